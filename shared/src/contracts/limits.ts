@@ -1,0 +1,25 @@
+/** Lengths, counts and sizes that the form, the DTO and the column share. */
+export const LIMITS = {
+  personName: 120,
+  email: 254,
+  companyName: 120,
+  passwordMin: 8,
+  /** bcrypt reads no further. */
+  passwordBytes: 72,
+  jobNumber: 32,
+  jobName: 160,
+  jobAddress: 400,
+  tag: 40,
+  title: 160,
+  label: 40,
+  area: 80,
+  system: 80,
+  source: 160,
+  elementId: 64,
+  elements: 500,
+  conductorGroups: 40,
+  depth: 32,
+  documentBytes: 256 * 1024,
+  pageSize: 100,
+  search: 80,
+} as const;

@@ -1,0 +1,6 @@
+/** A keyset page; `nextCursor` is opaque. */
+export interface Page<T> {
+  items: T[];
+  nextCursor: string | null;
+  total: number;
+}

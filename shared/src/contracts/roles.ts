@@ -1,0 +1,2 @@
+export const ROLES = ['owner', 'estimator', 'foreman', 'crew'] as const;
+export type Role = (typeof ROLES)[number];
