@@ -1,0 +1,47 @@
+import { Button, PasswordInput, TextInput } from '@mantine/core';
+import { useWords } from '../../../hooks/use-words';
+import { useSession } from '../../../lib/session';
+import { signIn } from '../api/session-requests';
+import { authRules } from './auth-rules';
+import { FormFailure } from './form-failure';
+import { useAuthForm } from './use-auth-form';
+import classes from './auth.module.css';
+
+export function SignInForm() {
+  const { say } = useWords();
+  const left = useSession((session) => session.left);
+  const rules = authRules(say);
+  const { form, submit, failure, sending } = useAuthForm(
+    {
+      initialValues: { email: '', password: '' },
+      validate: { email: rules.email, password: rules.password },
+    },
+    (values) => signIn({ email: values.email.trim(), password: values.password }),
+  );
+  const ranOut = left === 'ran-out' ? say('auth.session.ended') : null;
+
+  return (
+    <form className={classes.form} onSubmit={submit} noValidate>
+      <TextInput
+        label={say('auth.field.email')}
+        type="email"
+        autoComplete="username"
+        autoCapitalize="none"
+        spellCheck={false}
+        key={form.key('email')}
+        {...form.getInputProps('email')}
+      />
+      <PasswordInput
+        label={say('auth.field.password')}
+        autoComplete="current-password"
+        visibilityToggleButtonProps={{ 'aria-label': say('auth.showPassword') }}
+        key={form.key('password')}
+        {...form.getInputProps('password')}
+      />
+      <FormFailure words={failure ?? ranOut} />
+      <Button type="submit" variant="filled" fullWidth loading={sending}>
+        {say('auth.signIn.submit')}
+      </Button>
+    </form>
+  );
+}

@@ -1,0 +1,64 @@
+import { Strip } from '../../../../components/drawing/strip';
+import { useTheme } from '../../../../hooks/use-theme';
+import { useWords } from '../../../../hooks/use-words';
+import { useRunEditor } from '../../state/use-run-editor';
+import { useCommands } from '../commands/commands-context';
+import { useSelectedPiece } from '../hooks/use-piece';
+import { useWidth } from '../hooks/use-width';
+import { isEmptyRun } from '../model/empty-run';
+import { PanelBoundary } from '../panel-boundary';
+import { GhostStrip } from './ghost-strip';
+import classes from './strip.module.css';
+
+export type StripVariant = 'desk' | 'phone' | 'compact-height';
+
+interface Props {
+  variant: StripVariant;
+  isPhone?: boolean;
+}
+
+/** The run unrolled. One tab stop: the arrows walk the pieces, Enter goes to the fields of the one they stand on. */
+export function StripPanel({ variant, isPhone = false }: Props) {
+  const { say } = useWords();
+  const { ref, width } = useWidth();
+  const document = useRunEditor((state) => state.document);
+  return (
+    <section
+      ref={ref}
+      className={isPhone ? `${classes.panel} ${classes.phone}` : classes.panel}
+      aria-label={say('workbench.strip.title')}
+      data-variant={variant}
+    >
+      <PanelBoundary words={say('workbench.strip.broken')}>
+        {isEmptyRun(document) ? (
+          <GhostStrip variant={variant} />
+        ) : (
+          width > 0 && <DrawnStrip variant={variant} width={width} />
+        )}
+      </PanelBoundary>
+    </section>
+  );
+}
+
+function DrawnStrip({ variant, width }: { variant: StripVariant; width: number }) {
+  const document = useRunEditor((state) => state.document);
+  const analysis = useRunEditor((state) => state.analysis);
+  const expanded = useRunEditor((state) => state.expanded);
+  const select = useRunEditor((state) => state.select);
+  const selected = useSelectedPiece();
+  const { editSelected } = useCommands();
+  const { sun } = useTheme();
+  return (
+    <Strip
+      document={document}
+      analysis={analysis}
+      expanded={expanded}
+      width={width}
+      variant={variant}
+      sun={sun}
+      selectedId={selected?.id ?? null}
+      onSelect={select}
+      onEnter={editSelected}
+    />
+  );
+}

@@ -1,0 +1,2 @@
+/** A body that must be JSON and hold nothing. */
+export class EmptyDto {}

@@ -1,0 +1,192 @@
+import {
+  bend,
+  buildRun,
+  cable,
+  fitting,
+  flex,
+  offset,
+  pullPoint,
+  saddle3,
+  saddle4,
+  straight,
+  transition,
+  wires,
+} from '@fairlead/shared';
+import type { DemoRun } from './demo-run';
+
+const legs = (length: number) => straight({ length });
+
+/** A warehouse: long runs below the roof and under the slab, whips to the machines. */
+export const WAREHOUSE_RUNS: readonly DemoRun[] = [
+  {
+    area: 'Site',
+    system: 'Power',
+    document: buildRun({
+      tag: 'S-1',
+      title: 'Service lateral',
+      raceway: { type: 'PVC-40', tradeSize: '3' },
+      start: { heading: 'down' },
+      path: [
+        pullPoint({ device: 'cabinet', label: 'UT' }),
+        legs(48),
+        bend({ toward: 'east', made: 'factory', radius: 24 }),
+        legs(780),
+        bend({ angle: 15, toward: 'north', radius: 240, counts: false, why: 'trench sweep' }),
+        legs(520),
+        bend({ toward: 'up', made: 'factory', radius: 24 }),
+        legs(60),
+        fitting({ fitting: 'expansion' }),
+        legs(24),
+        pullPoint({ device: 'cabinet', label: 'MSB' }),
+      ],
+      conductors: [
+        wires({ count: 4, size: '500', colour: 'BK' }),
+        wires({ count: 1, size: '3', use: 'ground', colour: 'GN' }),
+      ],
+    }),
+  },
+  {
+    area: 'Site',
+    system: 'Power',
+    document: buildRun({
+      tag: 'S-2',
+      title: 'Service lateral, larger pipe',
+      raceway: { type: 'PVC-40', tradeSize: '3-1/2' },
+      start: { heading: 'down' },
+      path: [
+        pullPoint({ device: 'cabinet', label: 'UT' }),
+        legs(48),
+        bend({ toward: 'east', made: 'factory', radius: 24 }),
+        legs(1320),
+        transition({ raceway: { type: 'RMC', tradeSize: '3-1/2' } }),
+        bend({ toward: 'up', made: 'factory', radius: 24 }),
+        legs(84),
+        pullPoint({ device: 'cabinet', label: 'MSB' }),
+      ],
+      conductors: [
+        wires({ count: 4, size: '500', colour: 'BK' }),
+        wires({ count: 1, size: '3', use: 'ground', colour: 'GN' }),
+      ],
+    }),
+  },
+  {
+    area: 'High bay',
+    system: 'Lighting',
+    document: buildRun({
+      tag: 'B-12',
+      title: 'Bay lights over the sprinkler main',
+      start: { heading: 'north' },
+      path: [
+        pullPoint({ label: 'J-12' }),
+        legs(140),
+        saddle3({ height: 4, angle: 22.5, toward: 'up' }),
+        legs(180),
+        saddle4({ height: 6, width: 14, angle: 30, toward: 'up' }),
+        legs(160),
+        pullPoint({ label: 'J-13' }),
+      ],
+      conductors: [
+        wires({ count: 2, size: '10', colour: 'BN' }),
+        wires({ count: 1, size: '10', use: 'ground', colour: 'GN' }),
+      ],
+    }),
+  },
+  {
+    area: 'Dock',
+    system: 'Power',
+    document: buildRun({
+      tag: 'M-3',
+      title: 'Whip to the dock leveler',
+      path: [
+        pullPoint({ label: 'J-20' }),
+        legs(96),
+        bend(),
+        legs(60),
+        flex({ length: 48, degrees: 120, raceway: { type: 'LFMC', tradeSize: '3/4' } }),
+        pullPoint({ device: 'open-end', label: 'Leveler' }),
+      ],
+      conductors: [
+        wires({ count: 3, size: '10', colour: 'BK' }),
+        wires({ count: 1, size: '10', use: 'ground', colour: 'GN' }),
+      ],
+    }),
+  },
+  {
+    area: 'Paint store',
+    system: 'Power',
+    document: buildRun({
+      tag: 'M-5',
+      title: 'Paint store through the seal',
+      raceway: { type: 'RMC', tradeSize: '1' },
+      start: { heading: 'west' },
+      path: [
+        pullPoint({ device: 'conduit-body', body: 'C', label: 'C-1' }),
+        legs(84),
+        bend({ toward: 'south' }),
+        legs(110),
+        fitting({ fitting: 'seal' }),
+        legs(18),
+        pullPoint({ label: 'J-31' }),
+      ],
+      conductors: [wires({ count: 5, size: '10', colour: 'BK' })],
+    }),
+  },
+  {
+    area: 'Office',
+    system: 'Power',
+    document: buildRun({
+      tag: 'F-8',
+      title: 'Feeder behind the shaft wall',
+      raceway: { type: 'EMT', tradeSize: '1-1/4' },
+      start: { heading: 'up' },
+      path: [
+        pullPoint({ device: 'cabinet', label: 'MSB' }),
+        legs(70),
+        bend({ toward: 'north' }),
+        legs(160),
+        bend({ toward: 'east' }),
+        legs(120),
+        pullPoint({
+          device: 'conduit-body',
+          body: 'LB',
+          label: 'LB-2',
+          accessible: false,
+          turn: { angle: 90, toward: 'up' },
+        }),
+        legs(130),
+        bend({ toward: 'south' }),
+        legs(90),
+        offset({ rise: 6, angle: 22.5, toward: 'up' }),
+        legs(30),
+        pullPoint({ device: 'cabinet', label: 'OP-1' }),
+      ],
+      conductors: [
+        wires({ count: 4, size: '2', colour: 'BK' }),
+        wires({ count: 1, size: '8', use: 'ground', colour: 'GN' }),
+      ],
+    }),
+  },
+  {
+    area: 'Office',
+    system: 'Data',
+    document: buildRun({
+      tag: 'D-1',
+      title: 'Data room to the desk row',
+      rules: { profile: 'telecom' },
+      raceway: { type: 'EMT', tradeSize: '1-1/4' },
+      start: { heading: 'up' },
+      path: [
+        pullPoint({ device: 'pull-box', label: 'DR' }),
+        legs(80),
+        bend({ toward: 'east' }),
+        legs(420),
+        bend({ toward: 'down' }),
+        legs(70),
+        pullPoint({ label: 'D-1' }),
+      ],
+      conductors: [
+        cable({ count: 6, cable: { name: 'Data cable', od: 0.25, weight: 0.03, maxTension: 25 } }),
+      ],
+    }),
+  },
+];

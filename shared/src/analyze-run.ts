@@ -1,0 +1,69 @@
+import { checkAccess } from './checks/access';
+import { checkBendFitsLeg } from './checks/bend-fits-leg';
+import { checkContext } from './checks/check-context';
+import { checkSection } from './checks/check-section';
+import { checkDirections } from './checks/directions';
+import { checkRadius } from './checks/radius';
+import { makeVerdicts, worstStatus } from './checks/verdicts';
+import type { Finding, RunAnalysis, Severity } from './contracts/run-analysis';
+import { DEFAULT_SETTINGS } from './contracts/settings';
+import type { CompanySettings } from './contracts/settings';
+import { assumedValues } from './run/assumed-values';
+import { expandRun } from './run/expand-run';
+import { InvalidRunError } from './run/invalid-run-error';
+import { parseRunDocument } from './run/parse-run-document';
+import { isAccessible, isPullPoint } from './run/pull-points';
+import type { RunDocument } from './run/run-document';
+
+/** Changes whenever any run could be answered differently; drafts analysed by another version are analysed again. */
+export const ENGINE_VERSION = '1.0';
+
+/**
+ * Whether a run passes: every check over the expanded run, the sections, and one verdict for each check.
+ *
+ * It works on its own parsed copy, so nothing but a valid document is ever analysed.
+ *
+ * @throws InvalidRunError with every problem, for anything that is no valid run document
+ */
+export function analyzeRun(
+  input: RunDocument,
+  settings: CompanySettings = DEFAULT_SETTINGS,
+): RunAnalysis {
+  const parsed = parseRunDocument(input);
+  if (!parsed.ok) throw new InvalidRunError(parsed.problems);
+  const { document } = parsed;
+  const expanded = expandRun(document, settings);
+  const context = checkContext(document, expanded, settings);
+
+  const checked = expanded.sections.map((span) => checkSection(context, span));
+  const sections = checked.map(({ section }) => section);
+  const findings = worstFirst([
+    ...checked.flatMap((each) => each.findings),
+    ...checkAccess(context),
+    ...checkRadius(context),
+    ...checkBendFitsLeg(context),
+    ...checkDirections(context),
+  ]);
+  const verdicts = makeVerdicts(context, sections, findings);
+  return {
+    engineVersion: ENGINE_VERSION,
+    totals: {
+      length: expanded.length,
+      degrees: sections.reduce((sum, { degrees }) => sum + degrees, 0),
+      sections: sections.length,
+      pullPoints: document.path.filter((each) => isPullPoint(each) && isAccessible(each)).length,
+    },
+    sections,
+    verdicts,
+    status: worstStatus(verdicts.map(({ status }) => status)),
+    findings,
+    assumed: assumedValues(document, expanded, settings),
+  };
+}
+
+const WORST_FIRST: readonly Severity[] = ['stop', 'caution', 'note'];
+
+/** Stops, then cautions, then notes; among equals in the order the checks found them. */
+function worstFirst(findings: readonly Finding[]): Finding[] {
+  return WORST_FIRST.flatMap((severity) => findings.filter((each) => each.severity === severity));
+}

@@ -1,0 +1,95 @@
+import type { Finding } from '../contracts/run-analysis';
+import { racewayDimensions } from '../tables/raceway-dimensions';
+import { threeEqual } from './jam';
+import { areaOf, sizedGroups } from './section-conductors';
+import type { SectionConductors, SizedGroup } from './section-conductors';
+
+/** Room over the conductors below which a pull is tight; cable makers' pulling guides, in. */
+const TIGHT = 0.25;
+
+export interface ClearanceCheck {
+  /** in; null where no figure applies: sets of many conductors are judged by fill. */
+  answer: number | null;
+  findings: Finding[];
+}
+
+/**
+ * The room between the top of the conductors and the bore.
+ * Source: the single and triangular forms as published in cable makers' pulling guides; the cradled form, two and four
+ * conductors derived from their geometry.
+ *
+ * @example 3×500 THHN (0.949) in 3 EMT (3.356), cradled: 3.356/2 − 0.949/2 + 1.2035 × (1 − 2 × 0.3943²) = 2.03 in
+ */
+export function checkClearance(context: SectionConductors): ClearanceCheck {
+  const dimensions = racewayDimensions(context.raceway.type, context.raceway.tradeSize);
+  const sized = sizedGroups(context.groups);
+  if (!dimensions || sized.length === 0) return { answer: null, findings: [] };
+  const { bore, area } = dimensions;
+  const answer = clearanceOf(bore, sized);
+  const finding = (code: 'clearance-tight' | 'clearance-negative'): Finding => ({
+    code,
+    severity: code === 'clearance-tight' ? 'caution' : 'stop',
+    at: { sectionId: context.sectionId },
+    values: { clearance: answer, bore },
+    rule: null,
+  });
+  const cannot = areaOf(sized) > area || widestPair(sized) > bore;
+  if (cannot || (answer !== null && answer < 0)) {
+    return { answer, findings: [finding('clearance-negative')] };
+  }
+  return { answer, findings: answer !== null && answer < TIGHT ? [finding('clearance-tight')] : [] };
+}
+
+/** The two widest conductors side by side, in; one alone counts once. */
+function widestPair(sized: readonly SizedGroup[]): number {
+  const [first = 0, second = 0] = diametersOf(sized, 2);
+  return first + second;
+}
+
+/** The diameters of the widest conductors, widest first, at most `most` of them. */
+function diametersOf(sized: readonly SizedGroup[], most: number): number[] {
+  return sized
+    .flatMap(({ diameter, count }) => Array<number>(Math.min(count, most)).fill(diameter))
+    .sort((a, b) => b - a)
+    .slice(0, most);
+}
+
+/**
+ * Clearance, in, of one, two, three or four equal conductors (and of three with small ones beside them); null for any
+ * other set.
+ */
+function clearanceOf(bore: number, sized: readonly SizedGroup[]): number | null {
+  const three = threeEqual(sized);
+  if (three !== null) return clearanceOfThree(bore, three);
+  const [first, ...rest] = diametersOf(sized, 5);
+  if (first === undefined || rest.some((diameter) => diameter !== first)) return null;
+  switch (rest.length) {
+    case 0:
+      return bore - first;
+    case 1:
+      return clearanceOfTwo(bore, first);
+    case 3:
+      // The circle round four touching conductors is (1 + √2) d across.
+      return bore - (1 + Math.SQRT2) * first;
+    default:
+      return null;
+  }
+}
+
+/** Two side by side in the bottom of the bore: their centres lie (D − d)/2 from its axis and d apart. */
+function clearanceOfTwo(bore: number, diameter: number): number {
+  if (bore < 2 * diameter) return bore - 2 * diameter;
+  const radius = (bore - diameter) / 2;
+  return bore / 2 + Math.sqrt(radius ** 2 - (diameter / 2) ** 2) - diameter / 2;
+}
+
+/** Below a ratio of 2.5 three lie as a triangle, above it they cradle. */
+function clearanceOfThree(bore: number, diameter: number): number {
+  const circumscribed = 1 + 2 / Math.sqrt(3);
+  if (bore < circumscribed * diameter) return bore - circumscribed * diameter;
+  const half = (bore - diameter) / 2;
+  const ratio = diameter / (bore - diameter);
+  return bore / diameter < 2.5
+    ? bore / 2 - 1.366 * diameter + half * Math.sqrt(1 - ratio ** 2)
+    : bore / 2 - diameter / 2 + half * (1 - 2 * ratio ** 2);
+}

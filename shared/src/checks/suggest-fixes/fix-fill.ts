@@ -1,0 +1,7 @@
+import type { Finding } from '../../contracts/run-analysis';
+import type { Candidate, FixContext } from './candidate';
+import { largerRaceway } from './larger-raceway';
+
+export function fixFill(context: FixContext, finding: Finding): Candidate[] {
+  return largerRaceway(context, finding, true);
+}
