@@ -52,7 +52,9 @@ export async function ensurePrograms(programs, packages) {
     result = await install();
   }
   if (result.code !== 0 || !programs.every(findProgram)) {
-    throw new Told(`Debian's packages could not be installed. By hand: ${byHand}\n${result.out.slice(-1500)}`);
+    throw new Told(
+      `Debian's packages could not be installed. By hand: ${byHand}\n${result.out.slice(-1500)}`,
+    );
   }
   return undefined;
 }

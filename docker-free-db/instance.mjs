@@ -2,14 +2,7 @@
 // but a socket in the system's temp folder (socket paths end at 107 bytes).
 import { spawn } from 'node:child_process';
 import { createHash, randomBytes } from 'node:crypto';
-import {
-  existsSync,
-  mkdirSync,
-  openSync,
-  readFileSync,
-  rmSync,
-  writeFileSync,
-} from 'node:fs';
+import { existsSync, mkdirSync, openSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join, resolve } from 'node:path';
 import { must, stop } from '../scripts/lib/run.mjs';
@@ -21,7 +14,11 @@ import { answers } from './ready.mjs';
 const START_PATIENCE = 60_000;
 
 /** Tests only: a lost second of a throw-away database matters to nobody. */
-const RELAXED = ['--innodb-flush-log-at-trx-commit=0', '--innodb-doublewrite=0', '--skip-innodb-stats-persistent'];
+const RELAXED = [
+  '--innodb-flush-log-at-trx-commit=0',
+  '--innodb-doublewrite=0',
+  '--skip-innodb-stats-persistent',
+];
 const DURABLE = ['--innodb-flush-log-at-trx-commit=1'];
 
 const paths = (folder) => ({
@@ -124,8 +121,13 @@ export async function startInstance(folder, { relaxed = false } = {}) {
     `ALTER USER 'fairlead'@'${host}' IDENTIFIED BY '${password}';`,
     `GRANT ALL ON *.* TO 'fairlead'@'${host}';`,
   ]);
-  writeFileSync(at.init, `${users.join('\n')}\nCREATE DATABASE IF NOT EXISTS fairlead;\n`, { mode: 0o600 });
-  const socket = join(tmpdir(), `fairlead-${createHash('sha256').update(folder).digest('hex').slice(0, 16)}.sock`);
+  writeFileSync(at.init, `${users.join('\n')}\nCREATE DATABASE IF NOT EXISTS fairlead;\n`, {
+    mode: 0o600,
+  });
+  const socket = join(
+    tmpdir(),
+    `fairlead-${createHash('sha256').update(folder).digest('hex').slice(0, 16)}.sock`,
+  );
   const log = openSync(at.log, 'a');
   const child = spawn(
     findProgram('mariadbd'),

@@ -29,9 +29,13 @@ let failed = false;
 for (const [path, page] of Object.entries(PAGES)) {
   const files = chunksOf('index.html');
   if (manifest[page]) chunksOf(page, files);
-  const total = [...files].filter((file) => file.endsWith('.js')).reduce((sum, file) => sum + gzipped(file), 0);
+  const total = [...files]
+    .filter((file) => file.endsWith('.js'))
+    .reduce((sum, file) => sum + gzipped(file), 0);
   const over = total > BUDGET;
   failed ||= over;
-  console.log(`figure: entry JavaScript on ${path}: ${(total / 1024).toFixed(1)} KB gz of ${BUDGET / 1024} KB${over ? ', over' : ''}`);
+  console.log(
+    `figure: entry JavaScript on ${path}: ${(total / 1024).toFixed(1)} KB gz of ${BUDGET / 1024} KB${over ? ', over' : ''}`,
+  );
 }
 process.exit(failed ? 1 : 0);

@@ -23,7 +23,10 @@ function keep(command, args, { env = {}, cwd = ROOT } = {}) {
 
 async function dev() {
   await prepare();
-  await step('compile', async () => void (await must('npx', ['tsc', '-b', 'server/tsconfig.build.json'])));
+  await step(
+    'compile',
+    async () => void (await must('npx', ['tsc', '-b', 'server/tsconfig.build.json'])),
+  );
   database = await step('database', () => startDatabase(DATA));
   const apiPort = await freePortFrom(4601);
   const clientPort = await freePortFrom(4600);

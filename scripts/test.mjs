@@ -12,14 +12,24 @@ import { onEnd } from './lib/run.mjs';
 import { endWith, say, sinceStart } from './lib/say.mjs';
 
 const long = process.argv.includes('--long');
-const only = process.argv.includes('--only') ? process.argv[process.argv.indexOf('--only') + 1] : null;
+const only = process.argv.includes('--only')
+  ? process.argv[process.argv.indexOf('--only') + 1]
+  : null;
 
 const vitest = (name, config, cwd) => ({
   name,
   suite: true,
   cwd: join(ROOT, cwd),
   command: 'npx',
-  args: (report) => ['vitest', 'run', '--config', config, '--reporter=default', '--reporter=json', `--outputFile=${report}`],
+  args: (report) => [
+    'vitest',
+    'run',
+    '--config',
+    config,
+    '--reporter=default',
+    '--reporter=json',
+    `--outputFile=${report}`,
+  ],
 });
 const plain = (name, command, ...args) => ({ name, command, args: () => args });
 
@@ -78,7 +88,12 @@ async function runLane(gates) {
 function chosen() {
   if (!only) return LANES;
   const gate = LANES.flat().find(({ name }) => name === only);
-  if (!gate) throw new Error(`No gate named ${only}: ${LANES.flat().map(({ name }) => name).join(', ')}`);
+  if (!gate)
+    throw new Error(
+      `No gate named ${only}: ${LANES.flat()
+        .map(({ name }) => name)
+        .join(', ')}`,
+    );
   return [gate.after ? [plain('build', 'node', 'scripts/build.mjs'), gate] : [gate]];
 }
 

@@ -37,7 +37,8 @@ export function serverEnv(db, folder, port) {
 
 export const startDatabase = (folder, options) => startInstance(join(folder, 'mariadb'), options);
 
-export const migrate = (env) => must('node', [join(ROOT, 'server/dist/database/migrate.js')], { env });
+export const migrate = (env) =>
+  must('node', [join(ROOT, 'server/dist/database/migrate.js')], { env });
 
 /** Seeds the demo into an empty database; returns the sign-ins whether it was empty or not. */
 export async function seedDemo(env) {
@@ -58,7 +59,10 @@ export function startServer(env) {
   });
   return new Promise((resolve, reject) => {
     let out = '';
-    const timer = setTimeout(() => fail(`did not answer within ${SERVER_PATIENCE / 1000} s`), SERVER_PATIENCE);
+    const timer = setTimeout(
+      () => fail(`did not answer within ${SERVER_PATIENCE / 1000} s`),
+      SERVER_PATIENCE,
+    );
     const fail = async (why) => {
       clearTimeout(timer);
       await stop(child, 5000);

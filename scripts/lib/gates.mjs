@@ -42,10 +42,12 @@ export async function runGate(gate, env) {
     env: { ...env, ...(gate.env ?? {}) },
   });
   const counts = report ? readReport(report) : null;
-  const ok = code === 0 && (!report || (counts !== null && counts.passed > 0 && counts.failed === 0));
+  const ok =
+    code === 0 && (!report || (counts !== null && counts.passed > 0 && counts.failed === 0));
   const told = counts ? `, ${counts.passed} tests` : '';
   say(`${ok ? '✓' : '✗'} ${gate.name} (${seconds(from)}${told})`);
-  for (const line of out.split('\n').filter((text) => text.startsWith('figure: '))) say(`    ${line}`);
+  for (const line of out.split('\n').filter((text) => text.startsWith('figure: ')))
+    say(`    ${line}`);
   if (!ok) {
     for (const failure of (counts?.failures ?? []).slice(0, 20)) {
       say(`    ✗ ${failure.name}\n${indent(failure.text.slice(0, 3000))}`);
@@ -59,4 +61,9 @@ export async function runGate(gate, env) {
   };
 }
 
-const indent = (text) => text.trim().split('\n').map((line) => `      ${line}`).join('\n');
+const indent = (text) =>
+  text
+    .trim()
+    .split('\n')
+    .map((line) => `      ${line}`)
+    .join('\n');

@@ -16,7 +16,8 @@ export function checkNode() {
 
 export async function ensurePackages() {
   const hash = hashOf(['package-lock.json', 'package.json', '.npmrc']);
-  if (existsSync(join(ROOT, 'node_modules')) && stampMatches('packages', hash)) return 'there already';
+  if (existsSync(join(ROOT, 'node_modules')) && stampMatches('packages', hash))
+    return 'there already';
   await must('npm', ['ci', '--no-audit', '--no-fund']);
   writeStamp('packages', hash);
   return undefined;

@@ -36,9 +36,29 @@ function stopWhenTold(app: NestExpressApplication, server: Server): void {
   };
   process.on('SIGTERM', () => void stop());
   process.on('SIGINT', () => void stop());
-  const parent = Number(process.env.FAIRLEAD_PARENT_PID);
-  // Nobody tells a process that its parent was killed; it finds itself adopted.
-  if (parent) setInterval(() => process.ppid !== parent && void stop(), PARENT_CHECK_MS).unref();
+  const told = Number(process.env.FAIRLEAD_PARENT_PID);
+  if (told) whenParentIsGone(told, () => void stop());
+}
+
+/**
+ * Nobody tells a process that its parent was killed: it finds itself adopted, or, with a watcher in between, finds the
+ * process that started it all gone.
+ */
+function whenParentIsGone(told: number, act: () => void): void {
+  const parent = process.ppid;
+  setInterval(() => {
+    if (process.ppid !== parent || !isAlive(told)) act();
+  }, PARENT_CHECK_MS).unref();
+}
+
+function isAlive(pid: number): boolean {
+  try {
+    // Signal 0 only asks.
+    process.kill(pid, 0);
+    return true;
+  } catch {
+    return false;
+  }
 }
 
 main().catch((error: unknown) => {

@@ -1,3 +1,5 @@
+import { spawn } from 'node:child_process';
+import { setTimeout as wait } from 'node:timers/promises';
 import { MIGRATIONS } from '../src/database/migrations/all';
 import { startProcess } from './server-process';
 import { emptyDatabase, onServer, testDatabase } from './test-database';
@@ -34,8 +36,15 @@ it('SIGTERM ends it cleanly within five seconds, open connections or not', async
   expect(performance.now() - start).toBeLessThan(5000);
 });
 
-it('ends by itself when its parent is another than it was told', async () => {
-  const server = startProcess('src/main.ts', database, { FAIRLEAD_PARENT_PID: '1' });
+it('ends by itself once the process that started it is gone', async () => {
+  const starter = spawn(process.execPath, ['-e', 'setTimeout(() => {}, 60_000)']);
+  const env = { FAIRLEAD_PARENT_PID: String(starter.pid) };
+  const server = startProcess('src/main.ts', database, env);
+  const address = await server.ready;
+  // Longer than it takes to look.
+  await wait(1000);
+  expect((await fetch(`${address}/api/health`)).status).toBe(200);
+  starter.kill('SIGKILL');
   expect((await server.ended).code).toBe(0);
 });
 
@@ -48,6 +57,30 @@ it.each([
   expect(code).toBe(1);
   expect(output).toContain(fault);
   expect(output).not.toContain('ready');
+});
+
+it('writes no password, token or cookie into its log, not even at the finest level', async () => {
+  const server = startProcess('src/main.ts', database, { LOG_LEVEL: 'trace' });
+  const address = await server.ready;
+  const canary = 'canary-7f3a91';
+  const headers = {
+    'Content-Type': 'application/json',
+    Authorization: `Bearer ${canary}`,
+    Cookie: `fairlead_refresh=${canary}`,
+    'Idempotency-Key': canary,
+  };
+  const person = { name: 'Ann', email: `${canary}@shop.test`, companyName: 'Shop' };
+  const post = (path: string, body: object) =>
+    fetch(`${address}/api/${path}`, { method: 'POST', headers, body: JSON.stringify(body) });
+  const password = `${canary} and more`;
+  expect((await post('auth/sign-up', { ...person, password })).status).toBe(201);
+  expect((await post('auth/sign-in', { ...person, password: canary })).status).toBe(400);
+  expect((await post(`jobs?search=${canary}`, { password })).status).toBe(401);
+  server.kill('SIGTERM');
+  const { output } = await server.ended;
+  // It did log: each request is a line of its own.
+  expect(output).toContain('"path":"/api/auth/sign-up"');
+  expect(output).not.toContain(canary);
 });
 
 it('says so and ends when there is no database', async () => {

@@ -37,7 +37,10 @@ export function checkClearance(context: SectionConductors): ClearanceCheck {
   if (cannot || (answer !== null && answer < 0)) {
     return { answer, findings: [finding('clearance-negative')] };
   }
-  return { answer, findings: answer !== null && answer < TIGHT ? [finding('clearance-tight')] : [] };
+  return {
+    answer,
+    findings: answer !== null && answer < TIGHT ? [finding('clearance-tight')] : [],
+  };
 }
 
 /** The two widest conductors side by side, in; one alone counts once. */
