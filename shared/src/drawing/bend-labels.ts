@@ -1,0 +1,116 @@
+import { textWidth } from './text-width';
+
+/** What a piece wants written over its ticks. */
+export interface BendLabelWish {
+  /** Middle of its ticks, px. */
+  x: number;
+  text: string;
+  /** How many bends it stands for. */
+  bends: number;
+  section: number;
+  priority: 'selected' | 'crosses-limit' | 'rest';
+}
+
+export interface BendLabel {
+  x: number;
+  text: string;
+  /** 0 stands over the ticks, 1 above that with a leader. */
+  row: 0 | 1;
+}
+
+interface Group extends BendLabelWish {
+  left: number;
+  right: number;
+}
+
+interface Placed extends BendLabel {
+  left: number;
+  right: number;
+  /** Where its leader passes the lower row. */
+  leader: number | null;
+}
+
+export interface LabelBox {
+  rows: 1 | 2;
+  size: number;
+  /** Room between two labels of a row, px. */
+  gap: number;
+  width: number;
+  countText: (bends: number) => string;
+}
+
+/** Half the room kept clear beside a leader, px. */
+const LEADER = 3;
+const RANK = { selected: 0, 'crosses-limit': 1, rest: 2 } as const;
+
+/**
+ * Places the labels over the bends. What does not fit in the rows joins its neighbour of the same section as a count
+ * ("4 bends"), never across a pull point; what then still does not fit is left out. The selected piece is placed first,
+ * then the one that crosses the limit.
+ */
+export function placeBendLabels(wishes: readonly BendLabelWish[], box: LabelBox): BendLabel[] {
+  let groups: Group[] = wishes.map((wish) => ({ ...wish, left: wish.x, right: wish.x }));
+  // Each round joins at least one pair, so there are at most as many rounds as labels.
+  for (;;) {
+    const { placed, failed } = placeAll(groups, box);
+    const joined = joinFailed(groups, failed, box);
+    if (joined.length === groups.length) {
+      return placed.map(({ x, text, row }) => ({ x, text, row }));
+    }
+    groups = joined;
+  }
+}
+
+function placeAll(groups: readonly Group[], box: LabelBox): { placed: Placed[]; failed: Set<number> } {
+  const order = groups
+    .map((group, index) => ({ group, index }))
+    .sort((a, b) => RANK[a.group.priority] - RANK[b.group.priority] || a.group.x - b.group.x);
+  const placed: Placed[] = [];
+  const failed = new Set<number>();
+  for (const { group, index } of order) {
+    const width = textWidth(group.text, box.size, 600);
+    const x = Math.min(Math.max(group.x, width / 2), box.width - width / 2);
+    const wanted = { x, text: group.text, left: x - width / 2, right: x + width / 2 };
+    const rows = box.rows === 2 ? ([0, 1] as const) : ([0] as const);
+    const spot = rows
+      .map((row): Placed => ({ ...wanted, row, leader: row === 1 ? group.x : null }))
+      .find((each) => width <= box.width && placed.every((other) => areApart(each, other, box.gap)));
+    if (spot) placed.push(spot);
+    else failed.add(index);
+  }
+  return { placed, failed };
+}
+
+function areApart(a: Placed, b: Placed, gap: number): boolean {
+  if (a.row === b.row) return a.right + gap <= b.left || b.right + gap <= a.left;
+  const [lower, upper] = a.row === 0 ? [a, b] : [b, a];
+  const leader = upper.leader ?? upper.x;
+  return leader + LEADER <= lower.left || leader - LEADER >= lower.right;
+}
+
+/** Each label without a place joins its neighbour of the same section; a priority one keeps to itself. */
+function joinFailed(groups: readonly Group[], failed: ReadonlySet<number>, box: LabelBox): Group[] {
+  const result: Group[] = [];
+  let joinNext = false;
+  groups.forEach((group, index) => {
+    const last = result[result.length - 1];
+    const mayJoin =
+      last?.section === group.section && last.priority === 'rest' && group.priority === 'rest';
+    if (last && mayJoin && (joinNext || failed.has(index))) {
+      result[result.length - 1] = join(last, group, box);
+      joinNext = false;
+    } else {
+      result.push(group);
+      // Nobody on its left to join: it waits for the one on its right.
+      joinNext = failed.has(index);
+    }
+  });
+  return result;
+}
+
+function join(a: Group, b: Group, box: LabelBox): Group {
+  const bends = a.bends + b.bends;
+  const left = Math.min(a.left, b.left);
+  const right = Math.max(a.right, b.right);
+  return { ...a, bends, left, right, x: (left + right) / 2, text: box.countText(bends) };
+}
