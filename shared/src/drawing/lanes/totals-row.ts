@@ -1,0 +1,63 @@
+import { formatAngle } from '../../units/format-angle';
+import type { Mark, TextMark } from '../display-list';
+import type { DrawingSay } from '../say';
+import { statusMarks } from '../status-shapes';
+import type { StripLook } from '../strip-look';
+import { textWidth } from '../text-width';
+
+/** The sum of one section, and where it stands, px. */
+export interface SectionTotal {
+  from: number;
+  to: number;
+  degrees: number;
+  limit: number;
+  isOver: boolean;
+}
+
+const GAP = 6;
+const GLYPH_GAP = 5;
+
+/**
+ * The degrees of every section under its steps: "260°", and "380°, 20° over" after an octagon. Sections over the limit
+ * take their room first; a text without room is shortened, then left out.
+ */
+export function drawTotalsRow(
+  totals: readonly SectionTotal[],
+  width: number,
+  look: StripLook,
+  y: number,
+  say: DrawingSay,
+): Mark[] {
+  const taken: { left: number; right: number }[] = [];
+  const glyph = look.text + 2;
+  const order = [...totals].sort((a, b) => Number(b.isOver) - Number(a.isOver));
+  return order.flatMap((total): Mark[] => {
+    const degrees = formatAngle(total.degrees);
+    const past = { degrees, over: formatAngle(total.degrees - total.limit) };
+    const lead = total.isOver ? glyph + GLYPH_GAP : 0;
+    for (const text of total.isOver ? [say('strip.over', past), degrees] : [degrees]) {
+      const room = lead + textWidth(text, look.text, 600);
+      const left = Math.min(Math.max((total.from + total.to - room) / 2, 0), width - room);
+      const right = left + room;
+      const isFree = taken.every((each) => right + GAP <= each.left || each.right + GAP <= left);
+      if (left < 0 || !isFree) continue;
+      taken.push({ left, right });
+      const mark: TextMark = {
+        kind: 'text',
+        x: left + lead,
+        y,
+        text,
+        size: look.text,
+        weight: 600,
+        anchor: 'start',
+        fill: 'ink',
+        row: 'totals',
+      };
+      const middle = y - look.text * 0.36;
+      return total.isOver
+        ? [...statusMarks('over', left + glyph / 2, middle, glyph), mark]
+        : [mark];
+    }
+    return [];
+  });
+}

@@ -1,0 +1,101 @@
+import type { Spacing } from './scale';
+
+export type StripVariant = 'desk' | 'phone' | 'compact-height';
+
+/** Sizes of one kind of strip, px. A row of height 0 is not drawn. */
+export interface StripLook {
+  /** Left of the drawing, for the names and limits of the lanes; 0: limits stand over their line instead. */
+  gutter: number;
+  /** Between the ends of the run and the sides. */
+  side: number;
+  text: number;
+  pen: number;
+  tickPen: number;
+  halfBox: number;
+  /** Between the walls of the conduit. */
+  bore: number;
+  /** Height of the tick of a 90 over the upper wall. */
+  tick: number;
+  spacing: Spacing;
+  labelRows: 0 | 1 | 2;
+  labelRow: number;
+  names: number;
+  height: number;
+  limitRow: number;
+  degrees: number;
+  leastOver: number;
+  totals: number;
+  axis: number;
+  axisApart: number;
+}
+
+const DESK: StripLook = {
+  gutter: 104,
+  side: 16,
+  text: 12.5,
+  pen: 2,
+  tickPen: 3,
+  halfBox: 10,
+  bore: 9,
+  tick: 24,
+  spacing: { inside: 6, between: 13, beside: 4 },
+  labelRows: 2,
+  labelRow: 16,
+  names: 22,
+  height: 36,
+  limitRow: 0,
+  degrees: 66,
+  leastOver: 11,
+  totals: 20,
+  axis: 30,
+  axisApart: 58,
+};
+
+const PHONE: StripLook = {
+  ...DESK,
+  gutter: 0,
+  side: 15,
+  text: 14,
+  tickPen: 3.5,
+  halfBox: 12,
+  bore: 10,
+  tick: 22,
+  spacing: { inside: 7, between: 14, beside: 5 },
+  labelRows: 1,
+  labelRow: 18,
+  names: 22,
+  limitRow: 16,
+  degrees: 48,
+  leastOver: 14,
+  totals: 22,
+  axis: 30,
+  axisApart: 64,
+};
+
+/** For a screen held sideways: the run and its degrees. */
+const COMPACT_HEIGHT: StripLook = {
+  ...PHONE,
+  labelRows: 0,
+  tick: 12,
+  halfBox: 10,
+  names: 18,
+  height: 0,
+  limitRow: 0,
+  degrees: 24,
+  leastOver: 6,
+  totals: 20,
+  axis: 0,
+};
+
+const LOOKS: Record<StripVariant, StripLook> = {
+  desk: DESK,
+  phone: PHONE,
+  'compact-height': COMPACT_HEIGHT,
+};
+const SUN_PEN = 3;
+
+/** Sizes by variant; in the sun every line is 3 px or more. */
+export function stripLook(variant: StripVariant, sun: boolean): StripLook {
+  const look = LOOKS[variant];
+  return sun ? { ...look, pen: SUN_PEN, tickPen: SUN_PEN + 1 } : look;
+}
