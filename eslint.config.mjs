@@ -74,19 +74,22 @@ export default tseslint.config(
       },
     ],
   ),
-  oneWay(
-    ['client/src/features/**'],
-    [
-      up(['pages', 'app'], 'features import lib, hooks and components.'),
-      {
-        regex: '^(\\.\\./)+features/',
-        message: 'features never import each other; pages compose them.',
-      },
-      {
-        group: ['@fairlead/server', '@fairlead/shared/*'],
-        message: 'client imports only the door of shared.',
-      },
-    ],
+  // A feature reaches its siblings by climbing exactly as far as its folder is deep.
+  ...[1, 2, 3, 4].map((depth) =>
+    oneWay(
+      [`client/src/features/*/${'*/'.repeat(depth - 1)}*.{ts,tsx}`],
+      [
+        up(['pages', 'app'], 'features import lib, hooks and components.'),
+        {
+          regex: `^(\\.\\./){${depth}}(?!\\.\\./)|^(\\.\\./)+features/`,
+          message: 'features never import each other; pages compose them.',
+        },
+        {
+          group: ['@fairlead/server', '@fairlead/shared/*'],
+          message: 'client imports only the door of shared.',
+        },
+      ],
+    ),
   ),
   oneWay(
     ['client/src/pages/**'],

@@ -16,6 +16,8 @@ export * from './contracts/runs';
 export * from './contracts/settings';
 export * from './demo/demo-people';
 export type * from './drawing/display-list';
+export * from './drawing/compact-strip';
+export * from './drawing/strip';
 export * from './drawing/status-shapes';
 export * from './drawing/text-width';
 export * from './geometry/directions';

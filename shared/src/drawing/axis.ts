@@ -14,7 +14,7 @@ const GAP = 8;
 
 /** A station in feet, with inches only where there are some. `axisLabel(504)` is "42′". */
 export function axisLabel(inches: number): string {
-  if (inches < 1) return '0′';
+  if (inches < 0.5) return '0′';
   return formatLength(inches, { to: 1 }).replace(/′ 0″$/, '′');
 }
 

@@ -12,7 +12,10 @@ export interface BendLabelWish {
 }
 
 export interface BendLabel {
+  /** Middle of the text, px. */
   x: number;
+  /** What it points at, px. */
+  anchorX: number;
   text: string;
   /** 0 stands over the ticks, 1 above that with a leader. */
   row: 0 | 1;
@@ -55,13 +58,16 @@ export function placeBendLabels(wishes: readonly BendLabelWish[], box: LabelBox)
     const { placed, failed } = placeAll(groups, box);
     const joined = joinFailed(groups, failed, box);
     if (joined.length === groups.length) {
-      return placed.map(({ x, text, row }) => ({ x, text, row }));
+      return placed.map(({ x, anchorX, text, row }) => ({ x, anchorX, text, row }));
     }
     groups = joined;
   }
 }
 
-function placeAll(groups: readonly Group[], box: LabelBox): { placed: Placed[]; failed: Set<number> } {
+function placeAll(
+  groups: readonly Group[],
+  box: LabelBox,
+): { placed: Placed[]; failed: Set<number> } {
   const order = groups
     .map((group, index) => ({ group, index }))
     .sort((a, b) => RANK[a.group.priority] - RANK[b.group.priority] || a.group.x - b.group.x);
@@ -70,11 +76,19 @@ function placeAll(groups: readonly Group[], box: LabelBox): { placed: Placed[]; 
   for (const { group, index } of order) {
     const width = textWidth(group.text, box.size, 600);
     const x = Math.min(Math.max(group.x, width / 2), box.width - width / 2);
-    const wanted = { x, text: group.text, left: x - width / 2, right: x + width / 2 };
+    const wanted = {
+      x,
+      anchorX: group.x,
+      text: group.text,
+      left: x - width / 2,
+      right: x + width / 2,
+    };
     const rows = box.rows === 2 ? ([0, 1] as const) : ([0] as const);
     const spot = rows
       .map((row): Placed => ({ ...wanted, row, leader: row === 1 ? group.x : null }))
-      .find((each) => width <= box.width && placed.every((other) => areApart(each, other, box.gap)));
+      .find(
+        (each) => width <= box.width && placed.every((other) => areApart(each, other, box.gap)),
+      );
     if (spot) placed.push(spot);
     else failed.add(index);
   }

@@ -47,7 +47,11 @@ function leastGap(a: Stop, b: Stop, spacing: Spacing): number {
  *
  * @example two stops 10 units apart on 500 px: k = 50 px per unit, to scale
  */
-export function stationScale(stops: readonly Stop[], width: number, spacing: Spacing): StationScale {
+export function stationScale(
+  stops: readonly Stop[],
+  width: number,
+  spacing: Spacing,
+): StationScale {
   const gaps = stops.slice(1).map((stop, index) => {
     const before = stops[index] ?? stop;
     return {

@@ -17,7 +17,12 @@ export function statusMarks(status: Status, x: number, y: number, size: number):
   const unit = size / 20;
   const at = (dx: number, dy: number): Point => ({ x: x + dx * unit, y: y + dy * unit });
   const pen = { stroke: 'ink', strokeWidth: 1.7 * unit } as const;
-  const dot = (dy: number): Mark => ({ kind: 'circle', ...at(0, dy), radius: 1.15 * unit, fill: 'ink' });
+  const dot = (dy: number): Mark => ({
+    kind: 'circle',
+    ...at(0, dy),
+    radius: 1.15 * unit,
+    fill: 'ink',
+  });
   switch (status) {
     case 'ok':
       return [
@@ -46,21 +51,28 @@ export function statusMarks(status: Status, x: number, y: number, size: number):
           ...pen,
           strokeWidth: unit,
         },
-        ...[1, -1].map(
-          (slant): Mark => ({
-            kind: 'polyline',
-            points: [at(-3.2, -3.2 * slant), at(3.2, 3.2 * slant)],
-            stroke: 'on-over',
-            strokeWidth: 2 * unit,
-          }),
-        ),
+        ...[1, -1].map((slant): Mark => ({
+          kind: 'polyline',
+          points: [at(-3.2, -3.2 * slant), at(3.2, 3.2 * slant)],
+          stroke: 'on-over',
+          strokeWidth: 2 * unit,
+        })),
       ];
     case 'no-answer':
       return [
         { kind: 'circle', x, y, radius: 8.6 * unit, dash: [3 * unit, 2.4 * unit], ...pen },
         {
           kind: 'polyline',
-          points: [at(-2.8, -2), at(-2, -4.3), at(0, -5.1), at(2, -4.3), at(2.8, -2.4), at(1.9, -0.6), at(0, 0.8), at(0, 2.4)],
+          points: [
+            at(-2.8, -2),
+            at(-2, -4.3),
+            at(0, -5.1),
+            at(2, -4.3),
+            at(2.8, -2.4),
+            at(1.9, -0.6),
+            at(0, 0.8),
+            at(0, 2.4),
+          ],
           ...pen,
         },
         dot(5.2),

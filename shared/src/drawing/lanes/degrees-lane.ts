@@ -79,10 +79,18 @@ function drawSection(
     { kind: 'polyline', points: outline, closed: true, fill: 'fill-ok' },
     line(fromX, bottom, toX, bottom, { stroke: 'edge', strokeWidth: 1 }),
     { kind: 'polyline', points: outline, stroke: 'ink', strokeWidth: box.pen },
-    line(fromX, limitY, toX, limitY, { stroke: 'ink', strokeWidth: Math.max(1.5, box.pen), dash: box.dash }),
+    line(fromX, limitY, toX, limitY, {
+      stroke: 'ink',
+      strokeWidth: Math.max(1.5, box.pen),
+      dash: box.dash,
+    }),
     ...(last && crossing
       ? ([
-          line(crossing.x, limitY, crossing.x, bottom, { stroke: 'ink', strokeWidth: 1.5, dash: [1.5, 3] }),
+          line(crossing.x, limitY, crossing.x, bottom, {
+            stroke: 'ink',
+            strokeWidth: 1.5,
+            dash: [1.5, 3],
+          }),
           {
             kind: 'polyline',
             points: [...over, { x: toX, y: last.y }, { x: toX, y: limitY }],
@@ -95,4 +103,3 @@ function drawSection(
       : []),
   ];
 }
-

@@ -1,8 +1,8 @@
-import { formatLength } from '../../units/format-length';
 import { isPullPoint } from '../../run/pull-points';
+import { axisLabel } from '../axis';
 import type { ExpandedRun } from '../../run/expanded-run';
 import type { TextMark } from '../display-list';
-import type { DrawingSay } from '../say';
+import type { Say } from '../../words/create-words';
 import type { StripLook } from '../strip-look';
 import type { StripPlaces } from '../strip-places';
 import { fitText, textExtent, textWidth } from '../text-width';
@@ -17,7 +17,7 @@ export function drawNamesRow(
   steep: readonly SteepStretch[],
   look: StripLook,
   y: number,
-  say: DrawingSay,
+  say: Say,
 ): TextMark[] {
   const row = { kind: 'text', y, size: look.text, weight: 400, row: 'names' } as const;
   const points = expanded.elements.flatMap(({ element, index }) => {
@@ -37,7 +37,7 @@ export function drawNamesRow(
   });
   const taken = names.map(textExtent);
   const climbs = steep.flatMap(({ from, to, rise }): TextMark[] => {
-    const height = formatLength(Math.abs(rise), { to: 1 }).replace(/′ 0″$/, '′');
+    const height = axisLabel(Math.abs(rise));
     const text = say(rise > 0 ? 'strip.up' : 'strip.down', { height });
     const mark: TextMark = { ...row, x: (from + to) / 2, text, anchor: 'middle', fill: 'ink2' };
     const { left, right } = textExtent(mark);

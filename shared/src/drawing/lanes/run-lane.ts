@@ -95,7 +95,13 @@ function wallMarks(
   return [...marks, ...collars];
 }
 
-function stretchOfWall(wall: Wall, from: number, to: number, look: StripLook, axis: number): Mark[] {
+function stretchOfWall(
+  wall: Wall,
+  from: number,
+  to: number,
+  look: StripLook,
+  axis: number,
+): Mark[] {
   if (to <= from) return [];
   const half = look.bore / 2;
   const dash = wall === 'plastic' ? { dash: [10, 4] as [number, number] } : {};

@@ -1,6 +1,6 @@
 import { formatAngle } from '../../units/format-angle';
 import type { Mark, TextMark } from '../display-list';
-import type { DrawingSay } from '../say';
+import type { Say } from '../../words/create-words';
 import { statusMarks } from '../status-shapes';
 import type { StripLook } from '../strip-look';
 import { textWidth } from '../text-width';
@@ -26,7 +26,7 @@ export function drawTotalsRow(
   width: number,
   look: StripLook,
   y: number,
-  say: DrawingSay,
+  say: Say,
 ): Mark[] {
   const taken: { left: number; right: number }[] = [];
   const glyph = look.text + 2;

@@ -1,0 +1,46 @@
+import type { StripLook } from './strip-look';
+
+/** Where the rows and lanes of a strip stand, px from its top: baselines of texts, tops of lanes. */
+export interface StripRows {
+  /** Baseline of the lower row of bend labels. */
+  labels: number;
+  /** The middle of the conduit. */
+  run: number;
+  names: number;
+  height: number;
+  heightLabel: number;
+  limit: number;
+  degrees: number;
+  totals: number;
+  axis: number;
+  bottom: number;
+}
+
+const AIR = 6;
+
+export function stripRows(look: StripLook, hasHeight: boolean, hasLengths: boolean): StripRows {
+  const labels = look.labelRows * look.labelRow;
+  const run = labels + 4 + look.tick + look.bore / 2;
+  const underRun = run + Math.max(look.halfBox, look.bore / 2 + 3);
+  const names = underRun + look.names - 7;
+  const underNames = underRun + look.names;
+  const heightLabelRoom = hasHeight && look.gutter === 0 ? look.limitRow : 0;
+  const height = underNames + (hasHeight ? AIR : 0) + heightLabelRoom;
+  const underHeight = hasHeight ? height + look.height : underNames;
+  const degrees = underHeight + look.limitRow + (look.limitRow > 0 ? 2 : AIR);
+  const underDegrees = degrees + look.degrees;
+  const axis = underDegrees + look.totals;
+  const axisRoom = hasLengths ? look.axis : 0;
+  return {
+    labels: labels - 4,
+    run,
+    names,
+    height,
+    heightLabel: height - 4,
+    limit: degrees - 4,
+    degrees,
+    totals: axis - look.totals + look.text + 3,
+    axis,
+    bottom: Math.ceil(axis + axisRoom),
+  };
+}
