@@ -51,7 +51,7 @@ async function start() {
   say();
   if (port !== WANTED_PORT) say(`Port ${WANTED_PORT} is taken, so Fairlead uses ${port}.`);
   say(`Fairlead is at ${env.PUBLIC_URL}  (${sinceStart()}; Ctrl-C stops it)`);
-  say(`Demo sign-ins, password ${demo.password}:`);
+  if (demo.people.length > 0) say(`Demo sign-ins, password ${demo.password}:`);
   for (const person of demo.people) say(`  ${person.role.padEnd(10)} ${person.email}`);
   watch(server, db);
 }
