@@ -12,6 +12,8 @@ export default defineConfig({
   },
   build: {
     manifest: true,
+    // The content security policy loads fonts and pictures as files only.
+    assetsInlineLimit: 0,
     sourcemap: false,
     target: 'es2022',
     rolldownOptions: {

@@ -1,5 +1,6 @@
 import { Outlet, ScrollRestoration } from 'react-router-dom';
 import { useWords } from '../hooks/use-words';
+import { leave } from './leave';
 import { NewVersion } from './new-version';
 import { ShellHeader } from './shell-header';
 import { ShellTabs } from './shell-tabs';
@@ -16,7 +17,7 @@ export function ShellLayout() {
       <ShellHeader />
       <NewVersion />
       <main id="content" className={classes.content} tabIndex={-1}>
-        <Outlet />
+        <Outlet context={{ leave }} />
       </main>
       <ShellTabs />
       <ScrollRestoration />

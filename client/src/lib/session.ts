@@ -16,17 +16,40 @@ export type Session =
     }
   | { status: 'signed-in'; accessToken: string; me: Me; left: null };
 
+/** The refresh cookie cannot be seen from here; this mark says whether asking it is worth a request. */
+const MARK = 'fairlead.session';
+
+function mark(isIn: boolean): void {
+  try {
+    if (isIn) localStorage.setItem(MARK, 'in');
+    else localStorage.removeItem(MARK);
+  } catch {
+    // Without storage every load asks.
+  }
+}
+
+/** False only where this device is known to have nobody signed in. */
+export function mayBeSignedIn(): boolean {
+  try {
+    return localStorage.getItem(MARK) !== null;
+  } catch {
+    return true;
+  }
+}
+
 const nobody = { accessToken: null, me: null } as const;
 
 export const useSession = create<Session>(() => ({ status: 'unknown', ...nobody, left: null }));
 
 export function startSession({ accessToken, me }: SessionAnswer): void {
+  mark(true);
   useSession.setState({ status: 'signed-in', accessToken, me, left: null }, true);
 }
 
 export function endSession(byChoice: boolean): void {
   const wasIn = useSession.getState().status === 'signed-in';
   const left = byChoice ? 'by-choice' : wasIn ? 'ran-out' : 'never-in';
+  mark(false);
   useSession.setState({ status: 'signed-out', ...nobody, left }, true);
 }
 

@@ -38,7 +38,9 @@ export interface LabelBox {
   size: number;
   /** Room between two labels of a row, px. */
   gap: number;
-  width: number;
+  /** Where the rows begin and end, px. */
+  left: number;
+  right: number;
   countText: (bends: number) => string;
 }
 
@@ -74,25 +76,37 @@ function placeAll(
   const placed: Placed[] = [];
   const failed = new Set<number>();
   for (const { group, index } of order) {
-    const width = textWidth(group.text, box.size, 600);
-    const x = Math.min(Math.max(group.x, width / 2), box.width - width / 2);
-    const wanted = {
-      x,
-      anchorX: group.x,
-      text: group.text,
-      left: x - width / 2,
-      right: x + width / 2,
-    };
-    const rows = box.rows === 2 ? ([0, 1] as const) : ([0] as const);
-    const spot = rows
-      .map((row): Placed => ({ ...wanted, row, leader: row === 1 ? group.x : null }))
-      .find(
-        (each) => width <= box.width && placed.every((other) => areApart(each, other, box.gap)),
-      );
+    const spot = spotsOf(group, box).find((each) =>
+      placed.every((other) => areApart(each, other, box.gap)),
+    );
     if (spot) placed.push(spot);
     else failed.add(index);
   }
   return { placed, failed };
+}
+
+/** Where a label may stand, best first: over the middle of its bends, the upper row next, then towards their ends. */
+function spotsOf({ text, x, left, right }: Group, box: LabelBox): Placed[] {
+  const width = textWidth(text, box.size, 600);
+  if (width > box.right - box.left) return [];
+  const centres = left === right ? [x] : [x, (x + left) / 2, (x + right) / 2, left, right];
+  const rows = box.rows === 2 ? ([0, 1] as const) : ([0] as const);
+  return centres.flatMap((centre) =>
+    rows.map((row): Placed => {
+      const middle = Math.min(Math.max(centre, box.left + width / 2), box.right - width / 2);
+      const half = width / 2;
+      const leader = row === 1 ? centre : null;
+      return {
+        x: middle,
+        anchorX: centre,
+        text,
+        left: middle - half,
+        right: middle + half,
+        row,
+        leader,
+      };
+    }),
+  );
 }
 
 function areApart(a: Placed, b: Placed, gap: number): boolean {
@@ -102,24 +116,35 @@ function areApart(a: Placed, b: Placed, gap: number): boolean {
   return leader + LEADER <= lower.left || leader - LEADER >= lower.right;
 }
 
-/** Each label without a place joins its neighbour of the same section; a priority one keeps to itself. */
+/** Each label without a place joins the nearer neighbour of its section; a priority one keeps to itself. */
 function joinFailed(groups: readonly Group[], failed: ReadonlySet<number>, box: LabelBox): Group[] {
-  const result: Group[] = [];
-  let joinNext = false;
-  groups.forEach((group, index) => {
-    const last = result[result.length - 1];
-    const mayJoin =
-      last?.section === group.section && last.priority === 'rest' && group.priority === 'rest';
-    if (last && mayJoin && (joinNext || failed.has(index))) {
-      result[result.length - 1] = join(last, group, box);
-      joinNext = false;
-    } else {
-      result.push(group);
-      // Nobody on its left to join: it waits for the one on its right.
-      joinNext = failed.has(index);
-    }
+  const joinedWith = new Map<number, number>();
+  const gone = new Set<number>();
+  for (const index of failed) {
+    const neighbours = [index - 1, index + 1].filter(
+      (other) =>
+        mayJoin(groups[index], groups[other]) && !gone.has(other) && !joinedWith.has(other),
+    );
+    const [nearest] = neighbours.sort(
+      (a, b) => apart(groups[index], groups[a]) - apart(groups[index], groups[b]),
+    );
+    if (nearest === undefined || gone.has(index) || joinedWith.has(index)) continue;
+    joinedWith.set(Math.min(index, nearest), Math.max(index, nearest));
+    gone.add(Math.max(index, nearest));
+  }
+  return groups.flatMap((group, index) => {
+    const other = groups[joinedWith.get(index) ?? -1];
+    if (gone.has(index)) return [];
+    return [other ? join(group, other, box) : group];
   });
-  return result;
+}
+
+function mayJoin(a: Group | undefined, b: Group | undefined): boolean {
+  return a?.section === b?.section && a?.priority === 'rest' && b?.priority === 'rest';
+}
+
+function apart(a: Group | undefined, b: Group | undefined): number {
+  return a && b ? Math.max(a.left - b.right, b.left - a.right) : Infinity;
 }
 
 function join(a: Group, b: Group, box: LabelBox): Group {

@@ -34,6 +34,8 @@ const MOST_SHARE = 0.78;
 const BISECTIONS = 60;
 /** A gap drawn this much longer than its share still counts as to scale, px. */
 const UNSEEN = 0.5;
+/** Two things closer than this stand at one place: no leg between them is drawn longer. */
+const SHORTEST = 1;
 
 function leastGap(a: Stop, b: Stop, spacing: Spacing): number {
   if (a.isPullPoint || b.isPullPoint) return a.halfWidth + b.halfWidth + spacing.beside;
@@ -69,7 +71,9 @@ export function stationScale(
   const share = distance > 0 || sum === 0 ? 1 : full / sum;
   const xs = [0];
   for (const gap of drawn) xs.push((xs[xs.length - 1] ?? 0) + gap * share);
-  const stretched = gaps.filter((gap) => gap.least > perUnit * gap.distance + UNSEEN);
+  const stretched = gaps.filter(
+    ({ distance: own, least: m }) => own >= SHORTEST && m > perUnit * own + UNSEEN,
+  );
   return {
     width: full,
     perUnit,

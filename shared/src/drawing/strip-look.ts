@@ -8,6 +8,8 @@ export interface StripLook {
   gutter: number;
   /** Between the ends of the run and the sides. */
   side: number;
+  /** Kept clear between a text and the sides. */
+  edge: number;
   text: number;
   pen: number;
   tickPen: number;
@@ -31,7 +33,8 @@ export interface StripLook {
 
 const DESK: StripLook = {
   gutter: 104,
-  side: 16,
+  side: 20,
+  edge: 4,
   text: 12.5,
   pen: 2,
   tickPen: 3,
@@ -54,7 +57,7 @@ const DESK: StripLook = {
 const PHONE: StripLook = {
   ...DESK,
   gutter: 0,
-  side: 15,
+  side: 18,
   text: 14,
   tickPen: 3.5,
   halfBox: 12,
@@ -65,10 +68,10 @@ const PHONE: StripLook = {
   labelRow: 18,
   names: 22,
   limitRow: 16,
-  degrees: 48,
+  degrees: 47,
   leastOver: 14,
   totals: 22,
-  axis: 30,
+  axis: 28,
   axisApart: 64,
 };
 
@@ -76,12 +79,12 @@ const PHONE: StripLook = {
 const COMPACT_HEIGHT: StripLook = {
   ...PHONE,
   labelRows: 0,
-  tick: 12,
-  halfBox: 10,
-  names: 18,
+  tick: 10,
+  halfBox: 9,
+  names: 20,
   height: 0,
   limitRow: 0,
-  degrees: 24,
+  degrees: 22,
   leastOver: 6,
   totals: 20,
   axis: 0,

@@ -4,7 +4,9 @@ import { line } from './display-list';
 import type { StripPlaces } from './strip-places';
 
 /** The height of the overview of a strip that scrolls, px. */
-export const OVERVIEW_HEIGHT = 28;
+const HEIGHT = 28;
+/** What the two buttons beside it take, px. */
+export const OVERVIEW_BUTTONS = 96;
 const HALF_BOX = 3;
 const HIGHEST = 8;
 
@@ -14,7 +16,7 @@ export function drawOverview(
   places: StripPlaces,
   width: number,
 ): DisplayList {
-  const share = width / places.width;
+  const share = Math.max(width, 1) / places.width;
   const y = 18;
   const marks: Mark[] = [
     line(places.start * share, y, places.end * share, y, { stroke: 'ink', strokeWidth: 1.5 }),
@@ -26,10 +28,10 @@ export function drawOverview(
     ...expanded.elements.flatMap(({ element, index }): Mark[] => {
       const place = places.elements[index];
       if (element.kind !== 'pull-point' || !place) return [];
-      const x = place.from * share - HALF_BOX;
       const size = HALF_BOX * 2;
+      const x = Math.min(Math.max(place.from * share - HALF_BOX, 0), width - size);
       return [{ kind: 'rect', x, y: y - HALF_BOX, width: size, height: size, fill: 'ink' }];
     }),
   ];
-  return { width, height: OVERVIEW_HEIGHT, marks };
+  return { width, height: HEIGHT, marks };
 }

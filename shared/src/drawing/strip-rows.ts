@@ -17,6 +17,8 @@ export interface StripRows {
 }
 
 const AIR = 6;
+/** Between the lane of height and the degrees: their lines should not be read as one lane. */
+const LANE_AIR = 10;
 
 export function stripRows(look: StripLook, hasHeight: boolean, hasLengths: boolean): StripRows {
   const labels = look.labelRows * look.labelRow;
@@ -27,7 +29,8 @@ export function stripRows(look: StripLook, hasHeight: boolean, hasLengths: boole
   const heightLabelRoom = hasHeight && look.gutter === 0 ? look.limitRow : 0;
   const height = underNames + (hasHeight ? AIR : 0) + heightLabelRoom;
   const underHeight = hasHeight ? height + look.height : underNames;
-  const degrees = underHeight + look.limitRow + (look.limitRow > 0 ? 2 : AIR);
+  const degrees =
+    underHeight + look.limitRow + (look.limitRow > 0 ? 2 : hasHeight ? LANE_AIR : AIR);
   const underDegrees = degrees + look.degrees;
   const axis = underDegrees + look.totals;
   const axisRoom = hasLengths ? look.axis : 0;

@@ -17,7 +17,7 @@ import { wordRaceways, wordScale } from './strip-caption';
 import { drawGutter } from './strip-gutter';
 import { stripLook } from './strip-look';
 import type { StripVariant } from './strip-look';
-import { drawOverview } from './strip-overview';
+import { drawOverview, OVERVIEW_BUTTONS } from './strip-overview';
 import { placeRun } from './strip-places';
 import type { Place } from './strip-places';
 import { stripRows } from './strip-rows';
@@ -60,7 +60,7 @@ export function drawStrip(options: StripOptions): StripDrawing {
   const isWide = places.width > view + 1;
   const rows = stripRows(look, heights !== null, expanded.length !== null);
   const steps = sectionSteps(expanded, analysis, places);
-  const steep = steepStretches(expanded, places);
+  const steep = steepStretches(expanded, places, look);
   const labels = look.labelRows === 0 ? [] : bendLabels();
   const lane = drawDegreesLane(steps, {
     top: rows.degrees,
@@ -100,7 +100,7 @@ export function drawStrip(options: StripOptions): StripDrawing {
   return {
     gutter: look.gutter > 0 ? drawGutter({ look, rows, lane, limit, heights, say }) : null,
     body,
-    overview: isWide ? drawOverview(expanded, places, view) : null,
+    overview: isWide ? drawOverview(expanded, places, view - OVERVIEW_BUTTONS) : null,
     places: places.elements,
     sections: steps.map(({ id, fromX, toX }) => ({ id, from: fromX, to: toX })),
     caption: wordScale(expanded, places.scale.stretchedUnder, say),
@@ -122,7 +122,8 @@ export function drawStrip(options: StripOptions): StripDrawing {
       rows: look.labelRows === 2 ? 2 : 1,
       size: look.text,
       gap: 6,
-      width: places.width,
+      left: look.edge,
+      right: places.width - look.edge,
       countText: (count) => say('strip.bends', { count }),
     });
     return placed.flatMap(({ x, anchorX, text, row }): Mark[] => {
@@ -149,7 +150,7 @@ export function drawStrip(options: StripOptions): StripDrawing {
       line(places.start, rows.axis, places.end, rows.axis, { stroke: 'edge', strokeWidth: 1 }),
       ...ticks.flatMap(({ x, label }): Mark[] => {
         const half = textWidth(label, look.text, 400) / 2;
-        const middle = Math.min(Math.max(x, half), places.width - half);
+        const middle = Math.min(Math.max(x, look.edge + half), places.width - look.edge - half);
         const text: TextMark = {
           ...small(middle, rows.axis + 9 + look.text, label),
           weight: 400,

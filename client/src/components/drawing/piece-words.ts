@@ -1,5 +1,12 @@
 import { elementNumber, formatAngle, formatLength, wordBends } from '@fairlead/shared';
-import type { ExpandedRun, PathElement, RunAnalysis, RunDocument, Say, Straight } from '@fairlead/shared';
+import type {
+  ExpandedRun,
+  PathElement,
+  RunAnalysis,
+  RunDocument,
+  Say,
+  Straight,
+} from '@fairlead/shared';
 
 /** What the strip stops at: everything but the straights, which are the legs between. */
 export type Piece = Exclude<PathElement, Straight>;
@@ -49,7 +56,9 @@ export function sinceAt({ analysis, expanded }: RunView, piece: Piece): Since | 
   const section = placed && analysis.sections[placed.section];
   if (!placed || !section || section.from === piece.id) return null;
   const order = new Map(expanded.elements.map(({ element, index }) => [element.id, index]));
-  const passed = section.bends.filter(({ elementId }) => (order.get(elementId) ?? 0) <= placed.index);
+  const passed = section.bends.filter(
+    ({ elementId }) => (order.get(elementId) ?? 0) <= placed.index,
+  );
   const degrees = passed.at(-1)?.cumulative ?? 0;
   const { limitDegrees: limit, from: fromId } = section;
   return { degrees, limit, isOver: degrees > limit + PAST_LIMIT, fromId };
@@ -61,7 +70,8 @@ export function wordPieceFully(view: RunView, piece: Piece, say: Say): string {
   const placed = expanded.elements.find(({ element }) => element.id === piece.id);
   const since = sinceAt(view, piece);
   const words = [wordPieceShort(view, piece, say)];
-  if (piece.kind === 'pull-point' && piece.accessible === false) words.push(say('strip.notReached'));
+  if (piece.kind === 'pull-point' && piece.accessible === false)
+    words.push(say('strip.notReached'));
   if (placed && expanded.length !== null) {
     words.push(say('strip.atStation', { station: formatLength(placed.from, { to: 1 }) }));
   }

@@ -22,16 +22,18 @@ interface Props extends RunView {
 
 /** The run unrolled: one tab stop, in which ← and → walk the pieces, and a list of them for who hears the screen. */
 export function Strip(props: Props) {
-  const { document, analysis, expanded, width, variant, sun, selectedId, onSelect, onEnter } = props;
+  const { document, analysis, expanded, width, variant, sun, selectedId, onSelect, onEnter } =
+    props;
   const { say } = useWords();
   const id = useId();
   const scroller = useRef<HTMLDivElement>(null);
-  const drawing = useMemo(
-    () => drawStrip({ expanded, analysis, width, variant, sun, selectedId, say }),
-    [expanded, analysis, width, variant, sun, selectedId, say],
-  );
   const pieces = useMemo(() => piecesOf(document), [document]);
   const selected = pieceAt(document, selectedId);
+  const drawnId = selected?.id ?? null;
+  const drawing = useMemo(
+    () => drawStrip({ expanded, analysis, width, variant, sun, selectedId: drawnId, say }),
+    [expanded, analysis, width, variant, sun, drawnId, say],
+  );
   const view = width - (drawing.gutter?.width ?? 0);
   const scrolled = useScrolled(scroller);
   const place = drawing.places.find(({ elementId }) => elementId === selected?.id);
@@ -79,7 +81,7 @@ export function Strip(props: Props) {
       {variant !== 'compact-height' && (
         <p className={classes.caption}>
           {variant === 'desk' && <span>{total}</span>}
-          <span>{[drawing.raceways, drawing.caption].filter(Boolean).join(' · ')}</span>
+          <span>{[drawing.caption, drawing.raceways].filter(Boolean).join(' · ')}</span>
         </p>
       )}
       <div className={classes.drawn}>
@@ -95,7 +97,12 @@ export function Strip(props: Props) {
           onKeyDown={walk}
         >
           {/* The pointer picks what is nearest; the keys reach the same pieces on the list around it. */}
-          <div className={classes.body} style={{ width: drawing.body.width }} onClick={pick} role="presentation">
+          <div
+            className={classes.body}
+            style={{ width: drawing.body.width }}
+            onClick={pick}
+            role="presentation"
+          >
             <DisplayListSvg list={drawing.body} />
           </div>
           {pieces.map((piece) => (

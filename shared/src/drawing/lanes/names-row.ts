@@ -27,8 +27,8 @@ export function drawNamesRow(
   const names = points.flatMap(({ x, label }, index): TextMark[] => {
     const before = points[index - 1];
     const after = points[index + 1];
-    const left = before ? (before.x + x) / 2 + GAP / 2 : 0;
-    const right = after ? (x + after.x) / 2 - GAP / 2 : places.width;
+    const left = before ? (before.x + x) / 2 + GAP / 2 : look.edge;
+    const right = after ? (x + after.x) / 2 - GAP / 2 : places.width - look.edge;
     const text = label === '' ? null : fitText(label, right - left, look.text, 400);
     if (text === null) return [];
     const half = textWidth(text, look.text, 400) / 2;
@@ -42,8 +42,8 @@ export function drawNamesRow(
     const mark: TextMark = { ...row, x: (from + to) / 2, text, anchor: 'middle', fill: 'ink2' };
     const { left, right } = textExtent(mark);
     const isFree =
-      left >= 0 &&
-      right <= places.width &&
+      left >= look.edge &&
+      right <= places.width - look.edge &&
       taken.every((each) => right + GAP <= each.left || each.right + GAP <= left);
     if (!isFree) return [];
     taken.push({ left, right });

@@ -131,10 +131,10 @@ function couplings(
   const stick = (to - from) / sticks;
   if (sticks <= 1 || stick < LEAST_STICK) return [];
   const half = look.bore / 2 + 1;
-  return Array.from({ length: Math.ceil(sticks) - 1 }, (_, index) => {
-    const x = from + (index + 1) * stick;
-    return line(x, axis - half, x, axis + half, { stroke: 'edge', strokeWidth: look.pen });
-  });
+  const clear = look.halfBox + 3;
+  return Array.from({ length: Math.ceil(sticks) - 1 }, (_, index) => from + (index + 1) * stick)
+    .filter((x) => x > from + clear && x < to - clear)
+    .map((x) => line(x, axis - half, x, axis + half, { stroke: 'edge', strokeWidth: look.pen }));
 }
 
 /** ∧ where the run climbs, ∨ where it falls. */

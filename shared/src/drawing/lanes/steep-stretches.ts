@@ -1,4 +1,5 @@
 import type { ExpandedRun } from '../../run/expanded-run';
+import type { StripLook } from '../strip-look';
 import type { StripPlaces } from '../strip-places';
 
 /** Straight conduit steeper than 30°: where it stands, px, and how far it climbs (falls: negative), in. */
@@ -12,7 +13,11 @@ export interface SteepStretch {
 const STEEP = 0.5;
 
 /** The steep stretches of a run; straights that follow each other are one. */
-export function steepStretches(expanded: ExpandedRun, places: StripPlaces): SteepStretch[] {
+export function steepStretches(
+  expanded: ExpandedRun,
+  places: StripPlaces,
+  look: StripLook,
+): SteepStretch[] {
   const stretches: SteepStretch[] = [];
   let open: SteepStretch | null = null;
   for (const { element, index, headingBefore } of expanded.elements) {
@@ -23,11 +28,15 @@ export function steepStretches(expanded: ExpandedRun, places: StripPlaces): Stee
       continue;
     }
     const rise = slope * element.length;
+    const isBox = (at: number) => expanded.elements[at]?.element.kind === 'pull-point';
+    // The square of a pull point hides what is under it.
+    const from = place.from + (isBox(index - 1) ? look.halfBox : 0);
+    const to = place.to - (isBox(index + 1) ? look.halfBox : 0);
     if (open) {
-      open.to = place.to;
+      open.to = to;
       open.rise += rise;
     } else {
-      open = { from: place.from, to: place.to, rise };
+      open = { from, to, rise };
       stretches.push(open);
     }
   }

@@ -37,10 +37,13 @@ export function drawTotalsRow(
     const lead = total.isOver ? glyph + GLYPH_GAP : 0;
     for (const text of total.isOver ? [say('strip.over', past), degrees] : [degrees]) {
       const room = lead + textWidth(text, look.text, 600);
-      const left = Math.min(Math.max((total.from + total.to - room) / 2, 0), width - room);
+      const left = Math.min(
+        Math.max((total.from + total.to - room) / 2, look.edge),
+        width - look.edge - room,
+      );
       const right = left + room;
       const isFree = taken.every((each) => right + GAP <= each.left || each.right + GAP <= left);
-      if (left < 0 || !isFree) continue;
+      if (left < look.edge || !isFree) continue;
       taken.push({ left, right });
       const mark: TextMark = {
         kind: 'text',

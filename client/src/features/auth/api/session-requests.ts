@@ -1,7 +1,13 @@
 import type { SessionAnswer, SignInBody, SignUpBody } from '@fairlead/shared';
 import { api, refreshSession } from '../../../lib/api-client';
 import { failureOf } from '../../../lib/request-error';
-import { endSession, resetSession, startSession, useSession } from '../../../lib/session';
+import {
+  endSession,
+  mayBeSignedIn,
+  resetSession,
+  startSession,
+  useSession,
+} from '../../../lib/session';
 
 export async function signUp(body: SignUpBody): Promise<void> {
   startSession(await api.post<SessionAnswer>('/api/auth/sign-up', body, { anonymous: true }));
@@ -19,6 +25,7 @@ export async function signOut(): Promise<void> {
 
 /** Asks the refresh cookie who is here; never throws, the session store holds the outcome. */
 export async function openSession(): Promise<void> {
+  if (!mayBeSignedIn()) return endSession(false);
   try {
     await refreshSession();
   } catch (error) {

@@ -4,7 +4,7 @@ import { formatMoment } from '../../../../lib/format-date';
 import { useRunEditor } from '../../state/use-run-editor';
 import { labelOf } from '../model/word-piece';
 import { wordConflictField, wordConflictValue } from '../model/word-conflict';
-import { DialogFrame } from './dialog-frame';
+import { DialogFrame } from '../../../../components/dialog-frame';
 import { ConflictStrips } from './conflict-strips';
 import classes from './dialogs.module.css';
 

@@ -1,5 +1,5 @@
 import { useWords } from '../../../../hooks/use-words';
-import { DialogFrame } from './dialog-frame';
+import { DialogFrame } from '../../../../components/dialog-frame';
 import type { DialogName } from './dialog-name';
 import { IdentityForm } from './identity-form';
 import { RacewayForm } from './raceway-form';

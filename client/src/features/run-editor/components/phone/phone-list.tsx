@@ -66,7 +66,9 @@ function PhoneRow({ row, isSelected, onOpen }: RowProps) {
     >
       <span className={classes.rowNumber}>{number}</span>
       <span className={classes.rowName}>
-        {isLabelled ? say('workbench.piece.named', { label: piece.label ?? '', piece: name }) : name}
+        {isLabelled
+          ? say('workbench.piece.named', { label: piece.label ?? '', piece: name })
+          : name}
         <small>{details.join(', ')}</small>
       </span>
       <span className={classes.rowSince}>

@@ -1,7 +1,7 @@
 import { Modal } from '@mantine/core';
 import type { ReactNode } from 'react';
-import { useWords } from '../../../../hooks/use-words';
-import classes from './dialogs.module.css';
+import { useWords } from '../hooks/use-words';
+import classes from './dialog-frame.module.css';
 
 interface Props {
   isOpen: boolean;
@@ -12,7 +12,7 @@ interface Props {
   children: ReactNode;
 }
 
-/** How every dialog of the run editor looks. Its head is no page banner, so it is no header element. */
+/** How every dialog looks. Its head is no page banner, so it is no header element. */
 export function DialogFrame({ isOpen, title, size, onClose, children }: Props) {
   const { say } = useWords();
   return (
@@ -29,7 +29,7 @@ export function DialogFrame({ isOpen, title, size, onClose, children }: Props) {
       <Modal.Content>
         <div className={classes.head}>
           <Modal.Title className={classes.title}>{title}</Modal.Title>
-          {onClose && <Modal.CloseButton aria-label={say('workbench.add.close')} />}
+          {onClose && <Modal.CloseButton aria-label={say('app.close')} />}
         </div>
         <Modal.Body>{children}</Modal.Body>
       </Modal.Content>

@@ -1,0 +1,23 @@
+import { drawSketch } from '@fairlead/shared';
+import type { ExpandedRun, RunAnalysis } from '@fairlead/shared';
+import { useMemo } from 'react';
+import { useWords } from '../../hooks/use-words';
+import { DisplayListSvg } from './display-list-svg';
+
+interface Props {
+  expanded: ExpandedRun;
+  analysis: RunAnalysis;
+  width: number;
+  height: number;
+  selectedId: string | null;
+}
+
+/** The run in space. Decorative for a screen reader: the list says every direction. */
+export function Sketch({ expanded, analysis, width, height, selectedId }: Props) {
+  const { say } = useWords();
+  const list = useMemo(
+    () => drawSketch({ expanded, analysis, width, height, selectedId, say }),
+    [expanded, analysis, width, height, selectedId, say],
+  );
+  return <DisplayListSvg list={list} />;
+}
