@@ -1,9 +1,11 @@
+import { isOver } from '../checks/degree-limit';
 import type { StripSummary } from '../contracts/run-analysis';
 import type { DisplayList, Mark } from './display-list';
 import { line } from './display-list';
 import { drawDegreesLane } from './lanes/degrees-lane';
 import { stationScale } from './scale';
 import type { Stop } from './scale';
+import { pastLimit } from './strip-steps';
 
 const SIDE = 5;
 const HALF_BOX = 4;
@@ -36,7 +38,13 @@ export function drawCompactStrip(
           total = Math.min(degrees, total + angle);
           return { x: xAt(station), total };
         });
-        return { fromX: xAt(from), toX: xAt(to), steps, limit, isOver: status === 'over' };
+        return {
+          fromX: xAt(from),
+          toX: xAt(to),
+          steps,
+          limit,
+          past: pastLimit(isOver(degrees, limit), status),
+        };
       }),
       DEGREES,
     ).marks,

@@ -190,18 +190,35 @@ describe('what the strip says', () => {
       .filter((mark) => mark.row === row)
       .map(({ text }) => text);
 
+  const fills = (marks: Mark[], fill: string) =>
+    marks.filter((mark) => mark.kind !== 'text' && mark.fill === fill);
+  const over = buildRun({
+    path: [
+      pullPoint(),
+      ...Array.from({ length: 5 }, () => [straight(), bend()]).flat(),
+      pullPoint(),
+    ],
+  });
+  const compact = (document: RunDocument) =>
+    drawCompactStrip(summarizeRun(document, analyzeRun(document), expandRun(document)).strip, {
+      width: 200,
+    });
+
   it('says by how much a section is over, and fills what is over', () => {
-    expect(words(riser, 'totals')).toEqual(['450°, 90° over']);
-    const over = strip(riser, 1440, 'desk').body.marks.filter(({ kind }) => kind === 'polyline');
-    expect(over.filter((mark) => 'fill' in mark && mark.fill === 'fill-over')).toHaveLength(2);
-    const fine = strip(tiny, 1440, 'desk').body.marks;
-    expect(fine.filter((mark) => 'fill' in mark && mark.fill === 'fill-over')).toHaveLength(0);
+    expect(words(over, 'totals')).toEqual(['450°, 90° over']);
+    // The octagon and the part of the lane.
+    expect(fills(strip(over, 1440, 'desk').body.marks, 'fill-over')).toHaveLength(2);
+    expect(fills(compact(over).marks, 'fill-over')).toHaveLength(1);
+    expect(fills(strip(tiny, 1440, 'desk').body.marks, 'fill-over')).toHaveLength(0);
   });
 
-  it('fills what is over in a row of a list too', () => {
-    const { strip: summary } = summarizeRun(riser, analyzeRun(riser), expandRun(riser));
-    const { marks } = drawCompactStrip(summary, { width: 200 });
-    expect(marks.filter((mark) => mark.fill === 'fill-over')).toHaveLength(1);
+  it('warns where only planned flex passes the limit, as the verdict does', () => {
+    expect(analyzeRun(riser).status).toBe('watch');
+    expect(words(riser, 'totals')).toEqual(['450°, 90° over']);
+    const { marks } = strip(riser, 1440, 'desk').body;
+    expect(fills(marks, 'fill-over')).toHaveLength(0);
+    expect(fills(marks, 'fill-watch')).toHaveLength(2);
+    expect(fills(compact(riser).marks, 'fill-watch')).toHaveLength(1);
   });
 
   it('draws two runs to one scale in a list', () => {

@@ -1,4 +1,5 @@
 import { isOver } from '../checks/degree-limit';
+import { checkOf, statusOf } from '../checks/verdicts';
 import type { RunAnalysis } from '../contracts/run-analysis';
 import type { ExpandedRun } from '../run/expanded-run';
 import { isAccessible, isPullPoint } from '../run/pull-points';
@@ -8,6 +9,7 @@ import { line } from './display-list';
 import { placeNames } from './sketch-labels';
 import { isometric, sketchPath } from './sketch-path';
 import type { SketchStretch } from './sketch-path';
+import { pastLimit } from './strip-steps';
 
 export interface SketchOptions {
   expanded: ExpandedRun;
@@ -46,7 +48,7 @@ export function drawSketch(options: SketchOptions): DisplayList {
     height,
     marks: [
       ...compassMarks(compass, say),
-      ...conduit(path.stretches, overStations(options)),
+      ...conduit(path.stretches, pastSections(options)),
       ...boxes.map(({ element, at }): Mark => ({
         kind: 'rect',
         x: at.x - HALF_BOX,
@@ -94,33 +96,42 @@ function samples({ from, to }: SketchStretch): Point[] {
   });
 }
 
-/** Where sections over their limit begin and end. */
-function overStations({ expanded, analysis }: SketchOptions): { from: number; to: number }[] {
-  return expanded.sections.flatMap(({ fromStation, toStation }, index) => {
-    const section = analysis.sections[index];
-    const over = section && isOver(section.degrees, section.limitDegrees);
-    return over ? [{ from: fromStation, to: toStation }] : [];
+interface PastSection {
+  from: number;
+  to: number;
+  past: 'over' | 'watch' | null;
+}
+
+/** Where sections past their limit begin and end, and what that counts as. */
+function pastSections({ expanded, analysis }: SketchOptions): PastSection[] {
+  const findings = analysis.findings.filter(({ code }) => checkOf(code) === 'degrees');
+  return expanded.sections.map(({ id, fromStation, toStation }, index) => {
+    const { degrees = 0, limitDegrees = 0 } = analysis.sections[index] ?? {};
+    const status = statusOf(findings.filter(({ at }) => at.sectionId === id));
+    const past = pastLimit(isOver(degrees, limitDegrees), status);
+    return { from: fromStation, to: toStation, past };
   });
 }
 
-/** A double line; over its limit it is filled, with light dashes so that paper shows it too. */
-function conduit(
-  stretches: readonly SketchStretch[],
-  over: readonly { from: number; to: number }[],
-): Mark[] {
-  const drawn = stretches.map(({ from, to, station }) => ({
-    from,
-    to,
-    isPast: over.some((each) => station >= each.from && station <= each.to),
-  }));
-  const outer = drawn.map(({ from, to, isPast }) =>
-    line(from.x, from.y, to.x, to.y, { stroke: isPast ? 'fill-over' : 'ink', strokeWidth: 6 }),
+/** The core of the double line: plain, filled with light dashes where over, dashed in amber where watched. */
+const CORES = {
+  over: { outer: 'fill-over', inner: 'surface', width: 1.75, dash: [3, 4] },
+  watch: { outer: 'ink', inner: 'fill-watch', width: 2.5, dash: [5, 3] },
+} as const;
+
+function conduit(stretches: readonly SketchStretch[], sections: readonly PastSection[]): Mark[] {
+  const drawn = stretches.map(({ from, to, station }) => {
+    const section = sections.find((each) => station >= each.from && station <= each.to);
+    return { from, to, core: section?.past ? CORES[section.past] : null };
+  });
+  const outer = drawn.map(({ from, to, core }) =>
+    line(from.x, from.y, to.x, to.y, { stroke: core?.outer ?? 'ink', strokeWidth: 6 }),
   );
-  const inner = drawn.map(({ from, to, isPast }) =>
+  const inner = drawn.map(({ from, to, core }) =>
     line(from.x, from.y, to.x, to.y, {
-      stroke: 'surface',
-      strokeWidth: isPast ? 1.75 : 2.5,
-      ...(isPast ? { dash: [3, 4] as [number, number] } : {}),
+      stroke: core?.inner ?? 'surface',
+      strokeWidth: core?.width ?? 2.5,
+      ...(core ? { dash: [...core.dash] as [number, number] } : {}),
     }),
   );
   return [...outer, ...inner];

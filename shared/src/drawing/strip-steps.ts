@@ -1,5 +1,6 @@
 import { isOver } from '../checks/degree-limit';
-import type { RunAnalysis } from '../contracts/run-analysis';
+import { checkOf, statusOf } from '../checks/verdicts';
+import type { RunAnalysis, Status } from '../contracts/run-analysis';
 import type { ExpandedRun } from '../run/expanded-run';
 import type { DegreeSteps } from './lanes/degrees-lane';
 import type { StripPlaces } from './strip-places';
@@ -24,7 +25,9 @@ export function sectionSteps(
     const total = (own[own.length - 1]?.total ?? 0) + angle;
     own.push({ x: places.bends[index] ?? places.start, total, elementId });
   });
+  const findings = analysis.findings.filter(({ code }) => checkOf(code) === 'degrees');
   return expanded.sections.map((span, index) => {
+    const status = statusOf(findings.filter(({ at }) => at.sectionId === span.id));
     const { degrees = 0, limitDegrees: limit = 0 } = analysis.sections[index] ?? {};
     const own = steps[index] ?? [];
     return {
@@ -34,8 +37,17 @@ export function sectionSteps(
       steps: own.map(({ x, total }) => ({ x, total })),
       degrees,
       limit,
-      isOver: isOver(degrees, limit),
+      past: pastLimit(isOver(degrees, limit), status),
       crossing: own.find(({ total }) => isOver(total, limit))?.elementId ?? null,
     };
   });
+}
+
+/**
+ * What degrees past the limit count as. A single thing that decides (planned flex, for one) makes them a warning, as in
+ * the verdict.
+ */
+export function pastLimit(isPast: boolean, status: Status): DegreeSteps['past'] {
+  if (!isPast) return null;
+  return status === 'over' ? 'over' : 'watch';
 }

@@ -8,7 +8,7 @@ const section = (...totals: number[]) => ({
   toX: 400,
   steps: totals.map((total, index) => ({ x: 50 + index * 50, total })),
   limit: 360,
-  isOver: totals.some((total) => total > 360),
+  past: totals.some((total) => total > 360) ? ('over' as const) : null,
 });
 const overOf = (...totals: number[]) =>
   drawDegreesLane([section(...totals)], BOX).marks.find(

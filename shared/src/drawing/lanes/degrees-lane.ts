@@ -1,5 +1,6 @@
 import type { Mark, Point } from '../display-list';
 import { line } from '../display-list';
+import { hatchRect } from '../hatch';
 
 /** Degrees of one section, step by step: at `x` the total becomes `total`. */
 export interface DegreeSteps {
@@ -7,7 +8,8 @@ export interface DegreeSteps {
   toX: number;
   steps: { x: number; total: number }[];
   limit: number;
-  isOver: boolean;
+  /** What the degrees past the limit count as; null where none are. */
+  past: 'over' | 'watch' | null;
 }
 
 /** How far the limit stands below the top, and how far the worst may pass it. */
@@ -56,14 +58,14 @@ function drawSection(
   box: { top: number; pen: number; leastOver: number; dash: [number, number] },
   bottom: number,
 ): Mark[] {
-  const { fromX, toX, steps, limit, isOver } = section;
+  const { fromX, toX, steps, limit, past } = section;
   const outline: Point[] = [{ x: fromX, y: bottom }];
   const over: Point[] = [];
   const limitY = yAt(limit);
   let y = bottom;
   for (const { x, total } of steps) {
     outline.push({ x, y });
-    const isPast = isOver && total > limit;
+    const isPast = past !== null && total > limit;
     y = isPast ? limitY : yAt(total);
     outline.push({ x, y });
     if (isPast) {
@@ -85,21 +87,30 @@ function drawSection(
       dash: box.dash,
     }),
     ...(last && crossing
-      ? ([
+      ? [
           line(crossing.x, limitY, crossing.x, bottom, {
             stroke: 'ink',
             strokeWidth: 1.5,
             dash: [1.5, 3],
           }),
-          {
-            kind: 'polyline',
-            points: [...over, { x: toX, y: last.y }, { x: toX, y: limitY }],
-            closed: true,
-            fill: 'fill-over',
-            stroke: 'ink',
-            strokeWidth: 1,
-          },
-        ] satisfies Mark[])
+          ...pastLimit([...over, { x: toX, y: last.y }, { x: toX, y: limitY }], past),
+        ]
       : []),
   ];
+}
+
+/** Over: solid. Watch: hatched. `points` go up at every step and end under the last one. */
+function pastLimit(points: Point[], past: DegreeSteps['past']): Mark[] {
+  const fill = past === 'over' ? 'fill-over' : 'fill-watch';
+  const shape: Mark = { kind: 'polyline', points, closed: true, fill };
+  const outline: Mark = { kind: 'polyline', points, closed: true, stroke: 'ink', strokeWidth: 1 };
+  if (past === 'over') return [shape, outline];
+  const foot = points[points.length - 1]?.y ?? 0;
+  const hatch = points.slice(1).flatMap((point, index) => {
+    const before = points[index] ?? point;
+    return point.x > before.x
+      ? hatchRect(before.x, point.y, point.x - before.x, foot - point.y)
+      : [];
+  });
+  return [shape, ...hatch, outline];
 }

@@ -11,14 +11,14 @@ export interface SectionTotal {
   to: number;
   degrees: number;
   limit: number;
-  isOver: boolean;
+  past: 'over' | 'watch' | null;
 }
 
 const GAP = 6;
 const GLYPH_GAP = 5;
 
 /**
- * The degrees of every section under its steps: "260°", and "380°, 20° over" after an octagon. Sections over the limit
+ * The degrees of every section under its steps: "260°", and "380°, 20° over" after the glyph of its status. Sections past the limit
  * take their room first; a text without room is shortened, then left out.
  */
 export function drawTotalsRow(
@@ -30,12 +30,12 @@ export function drawTotalsRow(
 ): Mark[] {
   const taken: { left: number; right: number }[] = [];
   const glyph = look.text + 2;
-  const order = [...totals].sort((a, b) => Number(b.isOver) - Number(a.isOver));
+  const order = [...totals].sort((a, b) => Number(b.past !== null) - Number(a.past !== null));
   return order.flatMap((total): Mark[] => {
     const degrees = formatAngle(total.degrees);
-    const past = { degrees, over: formatAngle(total.degrees - total.limit) };
-    const lead = total.isOver ? glyph + GLYPH_GAP : 0;
-    for (const text of total.isOver ? [say('strip.over', past), degrees] : [degrees]) {
+    const values = { degrees, over: formatAngle(total.degrees - total.limit) };
+    const lead = total.past ? glyph + GLYPH_GAP : 0;
+    for (const text of total.past ? [say('strip.over', values), degrees] : [degrees]) {
       const room = lead + textWidth(text, look.text, 600);
       const left = Math.min(
         Math.max((total.from + total.to - room) / 2, look.edge),
@@ -57,8 +57,8 @@ export function drawTotalsRow(
         row: 'totals',
       };
       const middle = y - look.text * 0.36;
-      return total.isOver
-        ? [...statusMarks('over', left + glyph / 2, middle, glyph), mark]
+      return total.past
+        ? [...statusMarks(total.past, left + glyph / 2, middle, glyph), mark]
         : [mark];
     }
     return [];

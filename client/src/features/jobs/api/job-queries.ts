@@ -38,7 +38,6 @@ export const jobQuery = (jobId: string) =>
 export const peopleQuery = () =>
   queryOptions({
     queryKey: jobKeys.people,
-    queryFn: async ({ signal }) =>
-      (await api.get<Page<Person>>('/api/people', { query: { limit: 100 }, signal })).items,
+    queryFn: ({ signal }) => api.get<Person[]>('/api/people', { signal }),
     staleTime: 60_000,
   });

@@ -1,3 +1,4 @@
+import { elementNumber } from '@fairlead/shared';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
 import { useCommands } from '../commands/commands-context';
@@ -17,7 +18,8 @@ export function AddRow() {
   const labelOf = useLabelOf();
   const canEdit = useRunEditor((state) => state.canEdit);
   const afterId = useRunEditor((state) => insertionPoint(state.document, state.selectedId).id);
-  const after = say('workbench.add.after', { piece: labelOf(afterId) });
+  const number = useRunEditor((state) => elementNumber(state.document, afterId));
+  const after = say('workbench.add.after', { piece: number ?? labelOf(afterId) });
   return (
     <div className={classes.addRow} role="group" aria-label={say('workbench.add.title')}>
       <span className={classes.addAfter} title={after}>

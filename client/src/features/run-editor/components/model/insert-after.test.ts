@@ -41,12 +41,13 @@ describe('where a new piece goes', () => {
 });
 
 describe('what the add keys add', () => {
-  it('brings a leg of 10 feet and a direction', () => {
+  it('brings a leg of 10 feet on either side and a direction', () => {
     const { document, pieceId } = add(bare(), null, 'bend-90');
     expect(document.path.map(({ kind }) => kind)).toEqual([
       'pull-point',
       'straight',
       'bend',
+      'straight',
       'pull-point',
     ]);
     expect(document.path[1]).toMatchObject({ length: 120 });
@@ -56,7 +57,10 @@ describe('what the add keys add', () => {
   it('draws the 350° run key by key and breaks it at 45', () => {
     const keys = ['bend-90', 'bend-90', 'bend-90', 'offset-30', 'box-offset'] as const;
     const drawn = keys.reduce((document, key) => add(document, null, key).document, bare());
-    expect(analyzeRun(drawn).sections[0]).toMatchObject({ degrees: 350, remainingDegrees: 10 });
+    const analysis = analyzeRun(drawn);
+    expect(analysis.sections[0]).toMatchObject({ degrees: 350, remainingDegrees: 10 });
+    // What the keys draw can be bent as it stands.
+    expect(analysis.findings.filter(({ severity }) => severity === 'stop')).toEqual([]);
     const over = (['bend-90', 'bend-90', 'bend-90', 'offset-45', 'box-offset'] as const).reduce(
       (document, key) => add(document, null, key).document,
       bare(),

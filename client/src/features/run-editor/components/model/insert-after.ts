@@ -1,7 +1,13 @@
-import { applyCommand, expandRun, numberElements, vectorDirection } from '@fairlead/shared';
+import {
+  applyCommand,
+  expandRun,
+  numberElements,
+  straight,
+  vectorDirection,
+} from '@fairlead/shared';
 import type { Direction, PathElement, RunCommand, RunDocument, Vector } from '@fairlead/shared';
 import { isPiece, pieceOf } from './list-rows';
-import { newPieces } from './new-pieces';
+import { NEW_LEG, newPieces } from './new-pieces';
 import type { AddKey } from './new-pieces';
 
 export interface Insertion {
@@ -48,6 +54,20 @@ function isUndirected(document: RunDocument): boolean {
   return expandRun(document).directions === 'assumed-level';
 }
 
+/** A corner needs pipe on both sides: where none leads on to the next pull point, a leg comes along behind it too. */
+function legBehind(
+  document: RunDocument,
+  after: PathElement,
+  made: readonly PathElement[],
+): PathElement[] {
+  const next = document.path[document.path.indexOf(after) + 1];
+  const hasLeg = made.some(({ kind }) => kind === 'straight');
+  const isCorner = ['bend', 'offset', 'saddle-3', 'saddle-4', 'pull-point'].includes(
+    made.at(-1)?.kind ?? '',
+  );
+  return hasLeg && isCorner && next?.kind === 'pull-point' ? [straight({ length: NEW_LEG })] : [];
+}
+
 /**
  * The commands behind an add key: a leg and a piece after the selected one. The piece goes the first way that leaves no
  * piece after it parallel to the pipe; a person then sets the way it really goes.
@@ -58,11 +78,17 @@ export function insertAfter(
   key: AddKey,
 ): Insertion {
   const after = insertionPoint(document, selectedId);
-  const elements = numberElements(document, newPieces(key, document, after));
-  const piece = elements[elements.length - 1]!;
-  const rest = elements.slice(0, -1);
-  const commandsFor = (last: PathElement): RunCommand[] => [
-    { command: 'insert-elements', args: { afterId: after.id, elements: [...rest, last] } },
+  const made = newPieces(key, document, after);
+  const elements = numberElements(document, [...made, ...legBehind(document, after, made)]);
+  const piece = elements[made.length - 1]!;
+  const commandsFor = (turned: PathElement): RunCommand[] => [
+    {
+      command: 'insert-elements',
+      args: {
+        afterId: after.id,
+        elements: elements.map((element) => (element === piece ? turned : element)),
+      },
+    },
   ];
   if (!isDirected(piece) || isUndirected(document)) {
     return { commands: commandsFor(piece), pieceId: piece.id };

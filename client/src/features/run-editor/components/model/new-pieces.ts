@@ -43,7 +43,7 @@ export const ADD_GROUPS = [
 ] as const satisfies readonly { group: string; keys: readonly AddKey[] }[];
 
 /** The leg a new piece brings along, in; shown as given and meant to be changed. Our choice, no source. */
-const NEW_LEG = 120;
+export const NEW_LEG = 120;
 /** A box offset follows a box closely, in (common practice, no source). */
 const LEG_OUT_OF_A_BOX = 3;
 /** Face of a knockout to a wall, in (common practice, no source). */
