@@ -33,6 +33,11 @@ export default tseslint.config(
     languageOptions: { globals: globals.node },
     rules: { 'no-console': 'off' },
   },
+  {
+    // Some of its functions run in the page.
+    files: ['scripts/bench/keystroke.mjs'],
+    languageOptions: { globals: globals.browser },
+  },
   oneWay(
     ['shared/src/**'],
     [

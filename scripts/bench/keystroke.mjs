@@ -57,3 +57,34 @@ async function makeRun({ document, ids, keys }) {
   const run = await send(`/api/jobs/${job.id}/runs`, { id: ids[1], document }, keys[1]);
   return { jobId: job.id, runId: run.id };
 }
+
+const RUNS = 30;
+
+/** Enter in the rise of an offset: from the key event to the frame after the strip's marks have changed. */
+async function measure(page) {
+  await page.locator('tr[data-piece]', { hasText: 'Offset' }).first().click();
+  const field = page.getByLabel('Rise');
+  const times = [];
+  for (let run = 0; run < RUNS; run += 1) {
+    await field.fill(run % 2 === 0 ? '9' : '6');
+    const drawn = page.evaluate(untilDrawn);
+    await field.press('Enter');
+    times.push(await drawn);
+  }
+  // The first ones compile.
+  return times.slice(5);
+}
+
+/** In the page. */
+function untilDrawn() {
+  return new Promise((resolve) => {
+    let from = 0;
+    addEventListener('keydown', () => (from = performance.now()), { once: true, capture: true });
+    const observer = new MutationObserver(() => {
+      observer.disconnect();
+      requestAnimationFrame(() => resolve(performance.now() - from));
+    });
+    const strip = document.querySelector('[role="listbox"] svg');
+    observer.observe(strip, { subtree: true, childList: true, attributes: true });
+  });
+}

@@ -26,10 +26,10 @@ export function AuthFrame({ long, title, other, children }: AuthFrameProps) {
         <span className={classes.name}>{say('app.name')}</span>
         <ThemeSwitch />
       </header>
-      <div className={classes.lead}>
+      <aside className={classes.lead} aria-label={say('app.name')}>
         <p>{say('auth.lead')}</p>
         <RunDrawing />
-      </div>
+      </aside>
       <main className={classes.card}>
         <Title order={1}>{title}</Title>
         {children}
