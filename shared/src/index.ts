@@ -62,3 +62,4 @@ export * from './words/word-fix';
 export * from './words/word-key';
 export * from './words/word-verdict';
 export * from './checks/verdicts';
+export { en } from './words/en';
