@@ -30,8 +30,9 @@ export function axisTicks(options: {
   xAt: (station: number) => number;
   apart: number;
   size: number;
+  weight?: 400 | 600;
 }): AxisTick[] {
-  const { length, perUnit, xAt, apart, size } = options;
+  const { length, perUnit, xAt, apart, size, weight = 400 } = options;
   const end: AxisTick = { x: xAt(length), label: axisLabel(length) };
   const start: AxisTick = { x: xAt(0), label: axisLabel(0) };
   if (!(length > 0) || !(perUnit > 0)) return [start];
@@ -39,7 +40,7 @@ export function axisTicks(options: {
   const step =
     STEPS.find((each) => each * perUnit >= apart) ??
     largest * Math.ceil(apart / (largest * perUnit));
-  const half = (tick: AxisTick) => textWidth(tick.label, size, 400) / 2;
+  const half = (tick: AxisTick) => textWidth(tick.label, size, weight) / 2;
   const clear = (a: AxisTick, b: AxisTick) =>
     b.x - a.x >= Math.max(apart * TOO_CLOSE, half(a) + half(b) + GAP);
   // The labels at both ends are moved inside the drawing, so they take up to twice their half.

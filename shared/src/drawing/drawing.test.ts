@@ -18,10 +18,16 @@ const { say } = createWords('en');
 const runs = process.env.FAIRLEAD_LONG === '1' ? 1_000 : 100;
 const VARIANTS: StripVariant[] = ['desk', 'phone', 'compact-height'];
 
-function strip(document: RunDocument, width: number, variant: StripVariant, selectedId = '') {
+function strip(
+  document: RunDocument,
+  width: number,
+  variant: StripVariant,
+  selectedId = '',
+  sun = false,
+) {
   const expanded = expandRun(document);
   const analysis = analyzeRun(document);
-  return drawStrip({ expanded, analysis, width, variant, sun: false, selectedId, say });
+  return drawStrip({ expanded, analysis, width, variant, sun, selectedId, say });
 }
 
 function allLists(document: RunDocument, width: number, variant: StripVariant): DisplayList[] {
@@ -30,9 +36,11 @@ function allLists(document: RunDocument, width: number, variant: StripVariant): 
   const middle = document.path[Math.floor(document.path.length / 2)]?.id ?? null;
   const drawing = strip(document, width, variant, middle ?? '');
   const summary = summarizeRun(document, analysis, expanded);
+  const inSun = strip(document, width, variant, middle ?? '', true);
   return [
     drawing.body,
-    ...[drawing.gutter, drawing.overview].filter((list) => list !== null),
+    inSun.body,
+    ...[drawing.gutter, drawing.overview, inSun.gutter].filter((list) => list !== null),
     drawCompactStrip(summary.strip, { width: 200 }),
     drawSketch({ expanded, analysis, width: 320, height: 220, selectedId: middle, say }),
   ];

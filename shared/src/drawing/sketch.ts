@@ -17,10 +17,13 @@ export interface SketchOptions {
   width: number;
   height: number;
   selectedId: string | null;
+  /** Labels of 14 px, semi-bold. */
+  sun?: boolean;
   say: Say;
 }
 
 const TEXT = 12.5;
+const SUN_TEXT = 14;
 const SIDE = 34;
 const END = 24;
 const HALF_BOX = 6;
@@ -32,6 +35,7 @@ const SAMPLE = 6;
 /** The run in space, seen from the south-west above: an empty drawing where it has no directions or no lengths. */
 export function drawSketch(options: SketchOptions): DisplayList {
   const { expanded, width, height, selectedId, say } = options;
+  const text = options.sun ? SUN_TEXT : TEXT;
   const inner = { width: Math.max(1, width - 2 * SIDE), height: Math.max(1, height - 2 * END) };
   const path = sketchPath(expanded, { left: SIDE, top: END, ...inner });
   if (!path) return { width, height, marks: [] };
@@ -47,7 +51,7 @@ export function drawSketch(options: SketchOptions): DisplayList {
     width,
     height,
     marks: [
-      ...compassMarks(compass, say),
+      ...compassMarks(compass, text, say),
       ...conduit(path.stretches, pastSections(options)),
       ...boxes.map(({ element, at }): Mark => ({
         kind: 'rect',
@@ -62,11 +66,11 @@ export function drawSketch(options: SketchOptions): DisplayList {
       })),
       ...(selected ? [ring(path.pointAt((selected.from + selected.to) / 2))] : []),
       ...placeNames(
-        names.filter(({ text }) => text !== ''),
+        names.filter((name) => name.text !== ''),
         points,
         { width, height },
         [...taken, around(compass, COMPASS / 2)],
-        TEXT,
+        text,
       ),
     ],
   };
@@ -153,7 +157,7 @@ function freeCorner(points: readonly Point[], width: number, height: number): Po
   return corners[counts.indexOf(Math.min(...counts))] ?? { x: half, y: half };
 }
 
-function compassMarks(middle: Point, say: Say): Mark[] {
+function compassMarks(middle: Point, size: number, say: Say): Mark[] {
   const foot = { x: middle.x - ARM / 2, y: middle.y + 6 };
   const arms = [
     { way: { x: 0, y: 0, z: 1 }, text: say('strip.upAxis') },
@@ -169,10 +173,10 @@ function compassMarks(middle: Point, say: Say): Mark[] {
       {
         kind: 'text',
         x: isUp ? end.x : end.x + 4,
-        y: isUp ? end.y - 4 : end.y + TEXT * 0.36,
+        y: isUp ? end.y - 4 : end.y + size * 0.36,
         text,
-        size: TEXT,
-        weight: 400,
+        size,
+        weight: size === SUN_TEXT ? 600 : 400,
         anchor: isUp ? 'middle' : 'start',
         fill: 'ink2',
         row: 'sketch',

@@ -11,6 +11,8 @@ export interface StripLook {
   /** Kept clear between a text and the sides. */
   edge: number;
   text: number;
+  /** Of names and of the axis; what counts is always 600. */
+  weight: 400 | 600;
   pen: number;
   tickPen: number;
   halfBox: number;
@@ -36,6 +38,7 @@ const DESK: StripLook = {
   side: 20,
   edge: 4,
   text: 12.5,
+  weight: 400,
   pen: 2,
   tickPen: 3,
   halfBox: 10,
@@ -96,9 +99,12 @@ const LOOKS: Record<StripVariant, StripLook> = {
   'compact-height': COMPACT_HEIGHT,
 };
 const SUN_PEN = 3;
+const SUN_TEXT = 14;
 
-/** Sizes by variant; in the sun every line is 3 px or more. */
+/** Sizes by variant; in the sun every line is 3 px or more and every label 14 px or more and semi-bold. */
 export function stripLook(variant: StripVariant, sun: boolean): StripLook {
   const look = LOOKS[variant];
-  return sun ? { ...look, pen: SUN_PEN, tickPen: SUN_PEN + 1 } : look;
+  if (!sun) return look;
+  const text = Math.max(look.text, SUN_TEXT);
+  return { ...look, pen: SUN_PEN, tickPen: SUN_PEN + 1, text, weight: 600 };
 }

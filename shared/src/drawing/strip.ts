@@ -145,15 +145,16 @@ export function drawStrip(options: StripOptions): StripDrawing {
       xAt,
       apart: look.axisApart,
       size: look.text,
+      weight: look.weight,
     });
     return [
       line(places.start, rows.axis, places.end, rows.axis, { stroke: 'edge', strokeWidth: 1 }),
       ...ticks.flatMap(({ x, label }): Mark[] => {
-        const half = textWidth(label, look.text, 400) / 2;
+        const half = textWidth(label, look.text, look.weight) / 2;
         const middle = Math.min(Math.max(x, look.edge + half), places.width - look.edge - half);
         const text: TextMark = {
           ...small(middle, rows.axis + 9 + look.text, label),
-          weight: 400,
+          weight: look.weight,
           anchor: 'middle',
           fill: 'ink2',
           row: 'axis',

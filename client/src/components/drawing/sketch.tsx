@@ -1,6 +1,7 @@
 import { drawSketch } from '@fairlead/shared';
 import type { ExpandedRun, RunAnalysis } from '@fairlead/shared';
 import { useMemo } from 'react';
+import { useTheme } from '../../hooks/use-theme';
 import { useWords } from '../../hooks/use-words';
 import { DisplayListSvg } from './display-list-svg';
 
@@ -15,9 +16,10 @@ interface Props {
 /** The run in space. Decorative for a screen reader: the list says every direction. */
 export function Sketch({ expanded, analysis, width, height, selectedId }: Props) {
   const { say } = useWords();
+  const { sun } = useTheme();
   const list = useMemo(
-    () => drawSketch({ expanded, analysis, width, height, selectedId, say }),
-    [expanded, analysis, width, height, selectedId, say],
+    () => drawSketch({ expanded, analysis, width, height, selectedId, sun, say }),
+    [expanded, analysis, width, height, selectedId, sun, say],
   );
   return <DisplayListSvg list={list} />;
 }

@@ -19,7 +19,7 @@ export function drawNamesRow(
   y: number,
   say: Say,
 ): TextMark[] {
-  const row = { kind: 'text', y, size: look.text, weight: 400, row: 'names' } as const;
+  const row = { kind: 'text', y, size: look.text, weight: look.weight, row: 'names' } as const;
   const points = expanded.elements.flatMap(({ element, index }) => {
     const place = places.elements[index];
     return place && isPullPoint(element) ? [{ x: place.from, label: element.label ?? '' }] : [];
@@ -29,9 +29,9 @@ export function drawNamesRow(
     const after = points[index + 1];
     const left = before ? (before.x + x) / 2 + GAP / 2 : look.edge;
     const right = after ? (x + after.x) / 2 - GAP / 2 : places.width - look.edge;
-    const text = label === '' ? null : fitText(label, right - left, look.text, 400);
+    const text = label === '' ? null : fitText(label, right - left, look.text, look.weight);
     if (text === null) return [];
-    const half = textWidth(text, look.text, 400) / 2;
+    const half = textWidth(text, look.text, look.weight) / 2;
     const middle = Math.min(Math.max(x, left + half), right - half);
     return [{ ...row, x: middle, text, anchor: 'middle', fill: 'ink' }];
   });
