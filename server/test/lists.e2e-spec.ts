@@ -205,7 +205,13 @@ describe('the list of runs', () => {
   });
 });
 
-describe('a page is read from an index in its order, without sorting', () => {
+interface Plan {
+  select_type: string;
+  key: string;
+  Extra: string;
+}
+
+describe('a page is cut from an index in its order, without sorting what is not shown', () => {
   const directions = (sorts: readonly string[]) => sorts.flatMap((sort) => [sort, `-${sort}`]);
 
   it.each([
@@ -226,14 +232,13 @@ describe('a page is read from an index in its order, without sorting', () => {
     const pages = statements.filter((sql) => sql.includes('sortValue'));
     expect(pages.length).toBeGreaterThanOrEqual(1);
     for (const sql of pages) {
-      const [plan, ...joined] = await database.query<{ key: string; Extra: string }>(
-        `EXPLAIN ${sql}`,
-        { type: QueryTypes.SELECT },
-      );
-      expect(plan?.key).toContain(`${list === 'jobs' ? 'jobs' : 'run_revisions'}_by_`);
-      for (const { Extra } of [plan, ...joined].filter((row) => row !== undefined)) {
-        expect(Extra).not.toMatch(/filesort|temporary/);
-      }
+      const plans = await database.query<Plan>(`EXPLAIN ${sql}`, { type: QueryTypes.SELECT });
+      // Runs are cut in a table of their own and joined after: only the page is put in order again.
+      const cut = list === 'jobs' ? plans : plans.filter((row) => row.select_type === 'DERIVED');
+      expect(cut.length).toBeGreaterThanOrEqual(1);
+      expect(cut[0]?.key).toContain(`${list === 'jobs' ? 'jobs' : 'run_revisions'}_by_`);
+      for (const { Extra } of cut) expect(Extra).not.toMatch(/filesort|temporary/);
+      if (list === 'runs') expect(cut[0]?.Extra).toContain('Using index');
     }
   });
 });

@@ -76,7 +76,8 @@ export class JobQueries {
   async runCountsOf(companyId: string, jobIds: string[]): Promise<Map<string, number>> {
     if (jobIds.length === 0) return new Map();
     const rows = await this.sequelize.query<{ jobId: string; runs: number }>(
-      `SELECT listed_job_id AS jobId, COUNT(*) AS runs FROM run_revisions
+      `SELECT listed_job_id AS jobId, COUNT(*) AS runs
+       FROM run_revisions FORCE INDEX (run_revisions_in_status)
        WHERE company_id = :companyId AND listed_job_id IN (:jobIds) GROUP BY listed_job_id`,
       { replacements: { companyId, jobIds }, type: QueryTypes.SELECT },
     );

@@ -37,8 +37,8 @@ export class RunQueries {
   constructor(private readonly sequelize: Sequelize) {}
 
   /**
-   * One row more than `limit` when another page follows. The document stays where it is. STRAIGHT_JOIN: the list is read
-   * in order first and joined after, a hundred rows instead of the whole job.
+   * One row more than `limit` when another page follows. The page is cut from the index alone and joined after: a hundred
+   * rows instead of the whole job. The document stays where it is.
    */
   page(
     companyId: string,
@@ -51,7 +51,7 @@ export class RunQueries {
     const after = query.cursor ? readCursor(query.cursor, sort) : null;
     const keyset = keysetClause(sort, 'v.run_id', after);
     return this.sequelize.query<ListedRun>(
-      `SELECT STRAIGHT_JOIN v.run_id AS id, v.listed_job_id AS jobId, v.tag, v.title, r.area, r.system,
+      `SELECT v.run_id AS id, v.listed_job_id AS jobId, v.tag, v.title, r.area, r.system,
               v.number, v.state, v.status, v.length_inches AS lengthInches, v.degrees,
               v.worst_section_degrees AS worstSectionDegrees,
               v.remaining_degrees AS remainingDegrees, v.fill_percent AS fillPercent,
@@ -59,11 +59,15 @@ export class RunQueries {
               v.trade_size AS tradeSize, v.from_label AS fromLabel, v.to_label AS toLabel,
               v.strip, v.saved_at AS savedAt, u.name AS savedByName,
               ${sort.column.sql} AS sortValue
-       FROM run_revisions v FORCE INDEX (${sort.column.index})
+       FROM (
+         SELECT v.company_id, v.id FROM run_revisions v FORCE INDEX (${sort.column.index})
+         WHERE ${filter.where} AND ${keyset.where}
+         ORDER BY ${keyset.orderBy} LIMIT :rows
+       ) page
+       JOIN run_revisions v ON v.company_id = page.company_id AND v.id = page.id
        JOIN runs r ON r.company_id = v.company_id AND r.id = v.run_id
        JOIN users u ON u.id = v.saved_by
-       WHERE ${filter.where} AND ${keyset.where}
-       ORDER BY ${keyset.orderBy} LIMIT :rows`,
+       ORDER BY ${keyset.orderBy}`,
       {
         replacements: { ...filter.replacements, ...keyset.replacements, rows: limit + 1 },
         type: QueryTypes.SELECT,
