@@ -10,7 +10,8 @@ export default defineConfig({
     environment: 'happy-dom',
     include: ['src/**/*.test.{ts,tsx}'],
     setupFiles: ['src/test/setup.ts'],
-    testTimeout: 20_000,
+    // A property of the long run takes its ten thousand turns on a busy machine.
+    testTimeout: process.env.FAIRLEAD_LONG === '1' ? 600_000 : 20_000,
     css: { include: [/\?raw$/] },
     environmentOptions: { happyDOM: { url: 'http://127.0.0.1:4600/' } },
   },

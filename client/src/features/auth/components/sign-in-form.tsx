@@ -1,23 +1,26 @@
 import { Button, PasswordInput, TextInput } from '@mantine/core';
+import { useForm } from '@mantine/form';
+import { useSendForm } from '../../../hooks/use-send-form';
 import { useWords } from '../../../hooks/use-words';
 import { useSession } from '../../../lib/session';
 import { signIn } from '../api/session-requests';
 import { authRules } from './auth-rules';
 import { FormFailure } from './form-failure';
-import { useAuthForm } from './use-auth-form';
 import classes from './auth.module.css';
 
 export function SignInForm() {
   const { say } = useWords();
   const left = useSession((session) => session.left);
   const rules = authRules(say);
-  const { form, submit, failure, sending } = useAuthForm(
-    {
-      initialValues: { email: '', password: '' },
-      validate: { email: rules.email, password: rules.password },
-    },
-    (values) => signIn({ email: values.email.trim(), password: values.password }),
-  );
+  const form = useForm({
+    mode: 'uncontrolled',
+    initialValues: { email: '', password: '' },
+    validate: { email: rules.email, password: rules.password },
+  });
+  const { submit, failure, sending } = useSendForm({
+    form,
+    send: ({ email, password }) => signIn({ email: email.trim(), password }),
+  });
   const ranOut = left === 'ran-out' ? say('auth.session.ended') : null;
 
   return (

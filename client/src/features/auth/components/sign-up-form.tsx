@@ -1,26 +1,30 @@
 import { LIMITS } from '@fairlead/shared';
 import { Button, PasswordInput, TextInput } from '@mantine/core';
+import { useForm } from '@mantine/form';
+import { useSendForm } from '../../../hooks/use-send-form';
 import { useWords } from '../../../hooks/use-words';
 import { signUp } from '../api/session-requests';
 import { authRules } from './auth-rules';
 import { FormFailure } from './form-failure';
-import { useAuthForm } from './use-auth-form';
 import classes from './auth.module.css';
 
 export function SignUpForm() {
   const { say } = useWords();
   const rules = authRules(say);
-  const { form, submit, failure, sending } = useAuthForm(
-    {
-      initialValues: { name: '', email: '', password: '', companyName: '' },
-      validate: {
-        name: rules.line(LIMITS.personName),
-        email: rules.email,
-        password: rules.newPassword,
-        companyName: rules.line(LIMITS.companyName),
-      },
+  const form = useForm({
+    mode: 'uncontrolled',
+    initialValues: { name: '', email: '', password: '', companyName: '' },
+    validate: {
+      name: rules.name,
+      email: rules.email,
+      password: rules.newPassword,
+      companyName: rules.companyName,
     },
-    (values) =>
+  });
+  const { submit, failure, sending } = useSendForm({
+    form,
+    taken: { field: 'email', words: say('auth.problem.emailTaken') },
+    send: (values) =>
       signUp({
         name: values.name.trim(),
         email: values.email.trim(),
@@ -28,7 +32,7 @@ export function SignUpForm() {
         companyName: values.companyName.trim(),
         timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone,
       }),
-  );
+  });
 
   return (
     <form className={classes.form} onSubmit={submit} noValidate>

@@ -1,13 +1,15 @@
 import type { CreateJobBody, Job, Person, UpdateJobBody } from '@fairlead/shared';
 import { mutationOptions } from '@tanstack/react-query';
 import type { QueryClient } from '@tanstack/react-query';
+import type { Attempt } from '../../../hooks/use-send-form';
 import { api } from '../../../lib/api-client';
 import { takeFromLists } from '../../../lib/list-cache';
 import { jobKeys } from './job-queries';
 
 export const createJobMutation = (client: QueryClient) =>
   mutationOptions({
-    mutationFn: (body: CreateJobBody) => api.post<Job>('/api/jobs', body),
+    mutationFn: ({ attempt, body }: { attempt: Attempt; body: Omit<CreateJobBody, 'id'> }) =>
+      api.post<Job>('/api/jobs', { ...body, id: attempt.id }, { idempotencyKey: attempt.key }),
     onSuccess: (job) => {
       client.setQueryData(jobKeys.one(job.id), job);
       return client.invalidateQueries({ queryKey: jobKeys.lists });
@@ -16,7 +18,8 @@ export const createJobMutation = (client: QueryClient) =>
 
 export const updateJobMutation = (client: QueryClient, jobId: string) =>
   mutationOptions({
-    mutationFn: (body: UpdateJobBody) => api.patch<Job>(`/api/jobs/${jobId}`, body),
+    mutationFn: ({ attempt, body }: { attempt: Attempt; body: UpdateJobBody }) =>
+      api.patch<Job>(`/api/jobs/${jobId}`, body, { idempotencyKey: attempt.key }),
     onSuccess: (job) => {
       client.setQueryData(jobKeys.one(jobId), job);
       return client.invalidateQueries({ queryKey: jobKeys.lists });

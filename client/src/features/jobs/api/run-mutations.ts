@@ -1,6 +1,7 @@
-import type { CreateRunBody, Run, RunListItem } from '@fairlead/shared';
+import type { Run, RunDocument, RunListItem } from '@fairlead/shared';
 import { mutationOptions } from '@tanstack/react-query';
 import type { QueryClient } from '@tanstack/react-query';
+import type { Attempt } from '../../../hooks/use-send-form';
 import { api } from '../../../lib/api-client';
 import { takeFromLists } from '../../../lib/list-cache';
 import { jobKeys } from './job-queries';
@@ -15,7 +16,8 @@ const refreshLists = (client: QueryClient, jobId: string) =>
 
 export const createRunMutation = (client: QueryClient, jobId: string) =>
   mutationOptions({
-    mutationFn: (body: CreateRunBody) => api.post<Run>(`/api/jobs/${jobId}/runs`, body),
+    mutationFn: ({ attempt: { id, key }, document }: { attempt: Attempt; document: RunDocument }) =>
+      api.post<Run>(`/api/jobs/${jobId}/runs`, { id, document }, { idempotencyKey: key }),
     onSuccess: () => {
       void refreshLists(client, jobId);
     },

@@ -89,12 +89,8 @@ export function JobHead({ job }: { job: Job }) {
         <JobForm
           job={job}
           onCancel={() => setOpen(false)}
-          send={async ({ dueDate, ...body }) => {
-            await update.mutateAsync({
-              ...body,
-              dueDate: dueDate || null,
-              baseVersion: job.version,
-            });
+          send={async (body, attempt, baseVersion) => {
+            await update.mutateAsync({ attempt, body: { ...body, baseVersion } });
             setOpen(false);
           }}
         />

@@ -2,6 +2,7 @@ import { ActionIcon, NativeSelect } from '@mantine/core';
 import type { Job, Person } from '@fairlead/shared';
 import { IconX } from '@tabler/icons-react';
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { LoadFailure } from '../../../components/load-failure';
 import { useWords } from '../../../hooks/use-words';
 import { showToast } from '../../../lib/toasts';
 import { personOnJobMutation } from '../api/job-mutations';
@@ -62,6 +63,16 @@ export function JobPeople({ job }: { job: Job }) {
             const person = others.find(({ id }) => id === event.currentTarget.value);
             if (person) change.mutate({ person, on: true });
           }}
+        />
+      )}
+      {everyone.isSuccess && others.length === 0 && (
+        <span className={classes.small}>{say('jobs.people.everyone')}</span>
+      )}
+      {everyone.isError && (
+        <LoadFailure
+          message={say('jobs.failure.loadPeople')}
+          error={everyone.error}
+          onRetry={() => void everyone.refetch()}
         />
       )}
     </section>

@@ -11,7 +11,6 @@ import { ListSkeleton } from '../../../components/list-skeleton';
 import { LoadFailure } from '../../../components/load-failure';
 import { useListParams } from '../../../hooks/use-list-params';
 import { useWords } from '../../../hooks/use-words';
-import { newId } from '../../../lib/ids';
 import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
 import { createJobMutation } from '../api/job-mutations';
@@ -106,10 +105,9 @@ export function JobsPanel() {
       >
         <JobForm
           onCancel={() => setOpen(false)}
-          send={async ({ dueDate, ...body }) => {
-            const id = newId();
-            await create.mutateAsync({ ...body, id, dueDate: dueDate || null });
-            void navigate(paths.job(id));
+          send={async (body, attempt) => {
+            await create.mutateAsync({ attempt, body });
+            void navigate(paths.job(attempt.id));
           }}
         />
       </DialogFrame>

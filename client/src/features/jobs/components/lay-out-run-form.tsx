@@ -10,14 +10,15 @@ import {
   tradeSizesOf,
 } from '@fairlead/shared';
 import type { RacewayType, RunDocument, TradeSize } from '@fairlead/shared';
+import { useSendForm } from '../../../hooks/use-send-form';
+import type { Attempt } from '../../../hooks/use-send-form';
 import { useWords } from '../../../hooks/use-words';
-import { textRule } from '../state/job-problems';
-import { useSendForm } from '../state/use-send-form';
+import { textRule } from '../../../lib/text-rule';
 import { FormActs } from './form-acts';
 import classes from './jobs.module.css';
 
 interface LayOutRunFormProps {
-  send: (document: RunDocument) => Promise<void>;
+  send: (document: RunDocument, attempt: Attempt) => Promise<void>;
   onCancel: () => void;
 }
 
@@ -48,10 +49,11 @@ export function LayOutRunForm({ send, onCancel }: LayOutRunFormProps) {
       to: textRule(say, LIMITS.label, false),
     },
   });
-  const taken = { field: 'tag', words: say('jobs.runs.new.tagTaken') };
-  const { submit, failure, sending } = useSendForm(form, taken, (values) =>
-    send(documentOf(values)),
-  );
+  const { submit, failure, sending } = useSendForm({
+    form,
+    taken: { field: 'tag', words: say('jobs.runs.new.tagTaken') },
+    send: (values, attempt) => send(documentOf(values), attempt),
+  });
   const sizes = tradeSizesOf(form.values.type as RacewayType);
 
   const chooseType = (type: string) => {

@@ -10,8 +10,8 @@ import { ListControls } from '../../../components/list-controls';
 import { ListSkeleton } from '../../../components/list-skeleton';
 import { LoadFailure } from '../../../components/load-failure';
 import { useListParams } from '../../../hooks/use-list-params';
+import type { Attempt } from '../../../hooks/use-send-form';
 import { useWords } from '../../../hooks/use-words';
-import { newId } from '../../../lib/ids';
 import { paths } from '../../../lib/paths';
 import { showToast } from '../../../lib/toasts';
 import { createRunMutation, deleteRunMutation, restoreRunMutation } from '../api/run-mutations';
@@ -62,10 +62,9 @@ export function RunsPanel({ job }: { job: Job }) {
         }),
       onError: () => void showToast(say('jobs.failure.delete', { name: run.tag })),
     });
-  const send = async (document: RunDocument) => {
-    const id = newId();
-    await create.mutateAsync({ id, document });
-    void navigate(paths.run(job.id, id));
+  const send = async (document: RunDocument, attempt: Attempt) => {
+    await create.mutateAsync({ attempt, document });
+    void navigate(paths.run(job.id, attempt.id));
   };
   return (
     <section className={classes.page} aria-label={say('jobs.runs.title')}>

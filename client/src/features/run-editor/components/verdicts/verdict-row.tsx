@@ -38,7 +38,7 @@ export function VerdictRow({ onGo }: { onGo: (elementId: string) => void }) {
       {shownVerdicts(verdicts).map((verdict) => {
         const check = say(`workbench.verdict.check.${verdict.check}`);
         const words = wordVerdict(verdict, wording);
-        const status = say(`workbench.verdict.status.${verdict.status}`);
+        const status = say(`app.status.${verdict.status}`);
         const place = placeOf(verdict, sections, document);
         return (
           <button
