@@ -5,10 +5,8 @@ import { useInfiniteQuery, useMutation, useQueryClient } from '@tanstack/react-q
 import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { DialogFrame } from '../../../components/dialog-frame';
-import { EmptyPanel } from '../../../components/empty-panel';
 import { ListControls } from '../../../components/list-controls';
-import { ListSkeleton } from '../../../components/list-skeleton';
-import { LoadFailure } from '../../../components/load-failure';
+import { ListResult } from '../../../components/list-result';
 import { useListParams } from '../../../hooks/use-list-params';
 import { useWords } from '../../../hooks/use-words';
 import { paths } from '../../../lib/paths';
@@ -37,7 +35,6 @@ export function JobsPanel() {
   );
   const create = useMutation(createJobMutation(useQueryClient()));
   const [isOpen, setOpen] = useState(false);
-  const jobs = list.data?.pages.flatMap(({ items }) => items) ?? [];
   const isNarrowed = values.search !== '' || values.status !== '';
   const newJob = mayCreate && (
     <Button variant="filled" onClick={() => setOpen(true)}>
@@ -69,33 +66,14 @@ export function JobsPanel() {
           })),
         }}
       />
-      {list.isPending && <ListSkeleton rows={6} rowHeight="3.25rem" />}
-      {list.isError && (
-        <LoadFailure
-          message={say('jobs.failure.load')}
-          error={list.error}
-          onRetry={() => void list.refetch()}
-        />
-      )}
-      {list.isSuccess && jobs.length === 0 && (
-        <EmptyPanel words={emptyWords()}>
-          {isNarrowed && (
-            <Button variant="default" onClick={() => set({ search: '', status: '' })}>
-              {say('jobs.showAll')}
-            </Button>
-          )}
-        </EmptyPanel>
-      )}
-      {jobs.length > 0 && <JobsList jobs={jobs} />}
-      {list.hasNextPage && (
-        <Button
-          variant="default"
-          loading={list.isFetchingNextPage}
-          onClick={() => void list.fetchNextPage()}
-        >
-          {say('jobs.loadMore')}
-        </Button>
-      )}
+      <ListResult
+        list={list}
+        failure={say('jobs.failure.load')}
+        empty={emptyWords()}
+        onShowAll={isNarrowed ? () => set({ search: '', status: '' }) : null}
+      >
+        {(jobs) => <JobsList jobs={jobs} />}
+      </ListResult>
       {mayCreate && <div className={classes.foot}>{newJob}</div>}
       <DialogFrame
         isOpen={isOpen}

@@ -5,10 +5,8 @@ import { useInfiniteQuery, useMutation, useQueryClient } from '@tanstack/react-q
 import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { DialogFrame } from '../../../components/dialog-frame';
-import { EmptyPanel } from '../../../components/empty-panel';
 import { ListControls } from '../../../components/list-controls';
-import { ListSkeleton } from '../../../components/list-skeleton';
-import { LoadFailure } from '../../../components/load-failure';
+import { ListResult } from '../../../components/list-result';
 import { useListParams } from '../../../hooks/use-list-params';
 import type { Attempt } from '../../../hooks/use-send-form';
 import { useWords } from '../../../hooks/use-words';
@@ -41,7 +39,6 @@ export function RunsPanel({ job }: { job: Job }) {
   const create = useMutation(createRunMutation(client, job.id));
   const restore = useMutation(restoreRunMutation(client, job.id));
   const remove = useMutation(deleteRunMutation(client, job.id));
-  const runs = list.data?.pages.flatMap(({ items }) => items) ?? [];
   const isNarrowed = values.search !== '' || values.status !== '';
   const layOut = job.can.createRuns && (
     <Button variant="filled" onClick={() => setOpen(true)}>
@@ -91,33 +88,14 @@ export function RunsPanel({ job }: { job: Job }) {
           })),
         }}
       />
-      {list.isPending && <ListSkeleton rows={6} rowHeight="3.25rem" />}
-      {list.isError && (
-        <LoadFailure
-          message={say('jobs.failure.loadRuns')}
-          error={list.error}
-          onRetry={() => void list.refetch()}
-        />
-      )}
-      {list.isSuccess && runs.length === 0 && (
-        <EmptyPanel words={emptyWords()}>
-          {isNarrowed && (
-            <Button variant="default" onClick={() => set({ search: '', status: '' })}>
-              {say('jobs.showAll')}
-            </Button>
-          )}
-        </EmptyPanel>
-      )}
-      {runs.length > 0 && <RunsList runs={runs} onDelete={deleteRun} />}
-      {list.hasNextPage && (
-        <Button
-          variant="default"
-          loading={list.isFetchingNextPage}
-          onClick={() => void list.fetchNextPage()}
-        >
-          {say('jobs.loadMore')}
-        </Button>
-      )}
+      <ListResult
+        list={list}
+        failure={say('jobs.failure.loadRuns')}
+        empty={emptyWords()}
+        onShowAll={isNarrowed ? () => set({ search: '', status: '' }) : null}
+      >
+        {(runs) => <RunsList runs={runs} onDelete={deleteRun} />}
+      </ListResult>
       {job.can.createRuns && <div className={classes.foot}>{layOut}</div>}
       <DialogFrame
         isOpen={isOpen}
