@@ -46,7 +46,7 @@ function figures({ summary }: RunListItem, say: Say) {
 function Result({ run }: { run: RunListItem }) {
   const { say } = useWords();
   return (
-    <span className={classes.status}>
+    <span className={classes.status} data-status={run.summary.status}>
       <StatusGlyph status={run.summary.status} size={20} />
       {say(`app.status.${run.summary.status}`)}
     </span>
