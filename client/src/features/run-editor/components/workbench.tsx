@@ -1,5 +1,5 @@
+import { useMediaQuery } from '@mantine/hooks';
 import { memo, useCallback, useMemo, useState } from 'react';
-import { useNarrow } from '../../../hooks/use-narrow';
 import { useRunEditor } from '../state/use-run-editor';
 import { CommandsProvider } from './commands/commands-context';
 import type { Place } from './commands/commands';
@@ -11,6 +11,9 @@ import { focusFirstField } from './hooks/focus-first-field';
 import { PhoneWorkbench } from './phone/phone-workbench';
 import type { PhoneView } from './phone/phone-view';
 
+/** Held in a hand, upright or sideways. */
+const IN_HAND = '(max-width: 767px), (max-height: 479px)';
+
 interface Props {
   place: Place;
   goTo: (place: Place) => void;
@@ -18,7 +21,7 @@ interface Props {
 
 /** The open run: at a desk or in a hand, with its dialogs and its keys. */
 export const Workbench = memo(function Workbench({ place, goTo }: Props) {
-  const isNarrow = useNarrow();
+  const isInHand = useMediaQuery(IN_HAND, false, { getInitialValueInEffect: false });
   const [dialog, setDialog] = useState<DialogName | null>(null);
   const [view, setView] = useState<PhoneView>('list');
   const hasConflict = useRunEditor((state) => state.conflict !== null);
@@ -34,7 +37,7 @@ export const Workbench = memo(function Workbench({ place, goTo }: Props) {
 
   return (
     <CommandsProvider around={around}>
-      {isNarrow ? (
+      {isInHand ? (
         <PhoneWorkbench place={place} view={view} onView={setView} onOpen={setDialog} />
       ) : (
         <DeskWorkbench place={place} onOpen={setDialog} />

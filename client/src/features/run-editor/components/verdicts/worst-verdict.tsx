@@ -12,7 +12,8 @@ import classes from './verdicts.module.css';
 export function WorstVerdict({ onOpen }: { onOpen: () => void }) {
   const { say } = useWords();
   const wording = useWording();
-  const verdicts = shownVerdicts(useRunEditor((state) => state.analysis.verdicts));
+  const { row, met } = shownVerdicts(useRunEditor((state) => state.analysis.verdicts));
+  const verdicts = [...row, ...met];
   const worst = worstVerdict(verdicts);
   if (!worst) return null;
   return (
