@@ -110,7 +110,7 @@ describe('figures out of range', () => {
       }
     }
     const verdicts = await desk.locator('[data-check]').allInnerTexts();
-    expect(verdicts.length).toBeGreaterThan(5);
+    expect(verdicts.length).toBeGreaterThan(3);
     for (const verdict of verdicts) expect(verdict).toMatch(/\p{L}.*\S/u);
     expect(await desk.locator('[data-check="fill"]').innerText()).toMatch(/of \d/);
   });
