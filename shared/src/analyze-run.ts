@@ -3,11 +3,13 @@ import { checkBendFitsLeg } from './checks/bend-fits-leg';
 import { checkContext } from './checks/check-context';
 import { checkSection } from './checks/check-section';
 import { checkDirections } from './checks/directions';
+import { checkPull } from './checks/pulls';
 import { checkRadius } from './checks/radius';
 import { makeVerdicts, worstStatus } from './checks/verdicts';
 import type { Finding, RunAnalysis, Severity } from './contracts/run-analysis';
 import { DEFAULT_SETTINGS } from './contracts/settings';
 import type { CompanySettings } from './contracts/settings';
+import { analyzePulls } from './pull/analyze-pulls';
 import { assumedValues } from './run/assumed-values';
 import { expandRun } from './run/expand-run';
 import { InvalidRunError } from './run/invalid-run-error';
@@ -16,7 +18,7 @@ import { isAccessible, isPullPoint } from './run/pull-points';
 import type { RunDocument } from './run/run-document';
 
 /** Changes whenever any run could be answered differently; drafts analysed by another version are analysed again. */
-export const ENGINE_VERSION = '1.0';
+export const ENGINE_VERSION = '2.0';
 
 /**
  * Whether a run passes: every check over the expanded run, the sections, and one verdict for each check.
@@ -37,14 +39,21 @@ export function analyzeRun(
 
   const checked = expanded.sections.map((span) => checkSection(context, span));
   const sections = checked.map(({ section }) => section);
+  const pulls = analyzePulls(context);
   const findings = worstFirst([
     ...checked.flatMap((each) => each.findings),
+    ...pulls.flatMap((pull) => checkPull(context, pull)),
     ...checkAccess(context),
     ...checkRadius(context),
     ...checkBendFitsLeg(context),
     ...checkDirections(context),
   ]);
-  const verdicts = makeVerdicts(context, sections, findings);
+  const verdicts = makeVerdicts(
+    context,
+    sections,
+    pulls.map(({ answer }) => answer),
+    findings,
+  );
   return {
     engineVersion: ENGINE_VERSION,
     totals: {
@@ -54,6 +63,7 @@ export function analyzeRun(
       pullPoints: document.path.filter((each) => isPullPoint(each) && isAccessible(each)).length,
     },
     sections,
+    pulls: pulls.map(({ answer }) => answer),
     verdicts,
     status: worstStatus(verdicts.map(({ status }) => status)),
     findings,

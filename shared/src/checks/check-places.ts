@@ -1,5 +1,6 @@
-import type { CheckName, SectionAnalysis, Verdict } from '../contracts/run-analysis';
+import type { CheckName, PullAnalysis, SectionAnalysis, Verdict } from '../contracts/run-analysis';
 import type { CheckContext } from './check-context';
+import { lowestLimit } from './pulls';
 import { lengthLimit } from './section-length';
 
 /** A place a check looked at, before its findings are read. */
@@ -89,15 +90,63 @@ function isRunAnswered(check: CheckName, { expanded }: CheckContext): boolean {
   }
 }
 
-/** Where a check looked: each section, or the run as a whole. */
+type PullPlace = (pull: PullAnalysis) => Omit<CheckPlace, 'sectionId'>;
+
+/** Checks that answer for each pull; a pull is told by the section it begins in. */
+const BY_PULL: Partial<Record<CheckName, PullPlace>> = {
+  tension: (pull) => {
+    const { peak, governing, reason } = pull[pull.planned];
+    const lowest = pull.limits && lowestLimit(pull.limits);
+    return {
+      isAnswered: peak !== null,
+      badness: governing?.ratio ?? 0,
+      values: peak
+        ? {
+            likely: peak.likely,
+            high: peak.high,
+            allowed: lowest?.allowed ?? null,
+            limit: lowest?.limit ?? null,
+            method: pull.method?.likely ?? null,
+          }
+        : because(reason),
+    };
+  },
+  sidewall: (pull) => {
+    const { peakSidewall, reason } = pull[pull.planned];
+    return {
+      isAnswered: peakSidewall !== null,
+      badness: peakSidewall?.likely ?? 0,
+      values: peakSidewall
+        ? {
+            likely: peakSidewall.likely,
+            high: peakSidewall.high,
+            caution: pull.limits?.sidewall.caution ?? null,
+            stop: pull.limits?.sidewall.stop ?? null,
+          }
+        : because(reason),
+    };
+  },
+};
+
+/** Why a pull has no figures. */
+function because(reason: PullAnalysis['forward']['reason']): Verdict['values'] {
+  return { reason };
+}
+
+/** Where a check looked: each section, each pull, or the run as a whole. */
 export function checkPlaces(
   check: CheckName,
   sections: readonly SectionAnalysis[],
+  pulls: readonly PullAnalysis[],
   context: CheckContext,
 ): CheckPlace[] {
   const bySection = BY_SECTION[check];
   if (bySection) {
     return sections.map((section) => ({ sectionId: section.id, ...bySection(section, context) }));
+  }
+  const byPull = BY_PULL[check];
+  if (byPull) {
+    return pulls.map((pull) => ({ sectionId: pull.sectionIds[0] ?? null, ...byPull(pull) }));
   }
   const values: Verdict['values'] =
     check === 'directions' ? { directions: context.expanded.directions } : {};

@@ -2,6 +2,7 @@ import { CHECKS } from '../contracts/run-analysis';
 import type {
   CheckName,
   Finding,
+  PullAnalysis,
   SectionAnalysis,
   Severity,
   Status,
@@ -33,6 +34,18 @@ const CHECK_OF: Record<FindingCode, CheckName> = {
   'jam-possible': 'jam',
   'clearance-tight': 'clearance',
   'clearance-negative': 'clearance',
+  'tension-over': 'tension',
+  'tension-over-if-dry': 'tension',
+  'sidewall-over': 'sidewall',
+  'sidewall-past-caution': 'sidewall',
+  'pull-in-two': 'tension',
+  'pull-set-changes': 'tension',
+  'pull-turns-without-sheave': 'tension',
+  'pull-no-reach': 'tension',
+  'pull-hold-back': 'tension',
+  'pull-level-assumed': 'tension',
+  'rope-too-weak': 'tension',
+  'weight-estimated': 'tension',
   'radius-too-tight': 'radius',
   'radius-unknown': 'radius',
   'leg-too-short': 'bend-fits-leg',
@@ -60,11 +73,12 @@ export function statusOf(findings: readonly Finding[]): Status {
 export function makeVerdicts(
   context: CheckContext,
   sections: readonly SectionAnalysis[],
+  pulls: readonly PullAnalysis[],
   findings: readonly Finding[],
 ): Verdict[] {
   return CHECKS.map((check) => {
     const own = findings.filter(({ code }) => CHECK_OF[code] === check);
-    const [worst] = checkPlaces(check, sections, context)
+    const [worst] = checkPlaces(check, sections, pulls, context)
       .map((place) => judge(place, own))
       .sort(worseFirst);
     const said = worst?.said;

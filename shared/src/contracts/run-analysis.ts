@@ -107,11 +107,132 @@ export interface SectionAnalysis {
   clearance: number | null;
 }
 
+/** A figure at low, likely and high friction. */
+export interface Band {
+  low: number;
+  likely: number;
+  high: number;
+}
+
+/** Why a direction has no figures. `refused`: it cannot be pulled so; `unknown`: the run does not say enough. */
+export type PullReason =
+  | 'no-conductors'
+  | 'no-dimensions'
+  | 'no-lengths'
+  | 'no-directions'
+  | 'no-radius'
+  | 'existing-conductors'
+  | 'does-not-fit'
+  | 'not-accessible'
+  | 'set-changes'
+  | 'turns-without-sheave';
+
+export const STOP_LIMITS = ['conductor', 'attachment', 'sidewall', 'puller', 'rope'] as const;
+export type StopLimit = (typeof STOP_LIMITS)[number];
+
+/** The limit that gives first at likely friction. */
+export interface Governing {
+  limit: StopLimit;
+  /** lbf; lb/ft for sidewall. */
+  value: number;
+  allowed: number;
+  /** value / allowed. */
+  ratio: number;
+  /** The friction at which it is reached, up to 1.2; null: not by then, or always. */
+  reachedAt: number | null;
+}
+
+export interface ProfilePoint {
+  elementId: string;
+  /** Station, in, from the run's first pull point. */
+  station: number;
+  /** lbf in the cable when its head is here. */
+  tension: Band;
+  /** lb/ft on the worst conductor, leaving a bend. */
+  sidewall: Band | null;
+  /** What a gauge at the puller reads for each lbf at the head: the rope in the bends ahead, e^(μφ). */
+  ropeFactor: number;
+}
+
+/** A pull in one direction: fed at one end, pulled at the other. lbf, lb/ft. */
+export interface PullDirection {
+  status: 'ok' | 'unknown' | 'refused';
+  reason: PullReason | null;
+  /** Where the reason lies. */
+  reasonAt: string | null;
+  feedAt: string;
+  pullAt: string;
+  /** lbf at the feed, as given or by default. */
+  feed: number;
+  /** At the puller when the head arrives. */
+  tension: Band | null;
+  /** The most the head feels anywhere on the way. */
+  peak: Band | null;
+  /** To be held at the feed; 0 where the feed tension holds it. */
+  holdBack: Band | null;
+  peakSidewall: Band | null;
+  /** The bend of the largest sidewall pressure. */
+  peakSidewallAt: string | null;
+  governing: Governing | null;
+  profile: ProfilePoint[];
+}
+
+export type PullMethod = 'easy' | 'one' | 'two' | 'puller' | 'not-as-drawn';
+
+export interface MethodAnswer {
+  likely: PullMethod;
+  high: PullMethod;
+  /** The friction above which a harder method is needed; null: none up to 1.2. */
+  flipsAt: number | null;
+  /** What it then is. */
+  flipsTo: PullMethod | null;
+}
+
+export type Configuration = 'single' | 'two' | 'triangular' | 'cradled' | 'diamond' | 'complex';
+
+export interface PullAnalysis {
+  id: string;
+  from: string;
+  to: string;
+  /** Pull points it goes straight through. */
+  through: string[];
+  /** Sections it goes through, by id. */
+  sectionIds: string[];
+  /** Of the section where it corrects the weight most; null without a set that fits. */
+  configuration: Configuration | null;
+  weightCorrection: number | null;
+  /** lb/ft of the whole set. */
+  weight: number | null;
+  /** Fed at `from`, pulled at `to`. */
+  forward: PullDirection;
+  reverse: PullDirection;
+  recommended: 'forward' | 'reverse' | null;
+  /** Why none is recommended. */
+  noneBecause: 'hold-back' | 'no-reach' | 'no-answer' | null;
+  /** The direction the plan asks for, else the recommended one, else the easier of the two. */
+  planned: 'forward' | 'reverse';
+  method: MethodAnswer | null;
+  limits: {
+    conductor: number;
+    attachment: number;
+    sidewall: { caution: number; stop: number };
+    handOne: number;
+    handTwo: number;
+    puller: number | null;
+    rope: number | null;
+  } | null;
+  attachment: 'eye' | 'basket-grip' | 'tied-head';
+  friction: Band;
+  ropeFriction: number;
+}
+
 export const CHECKS = [
   'degrees',
   'access',
+  'tension',
   'fill',
   'jam',
+  'sidewall',
   'clearance',
   'radius',
   'bend-fits-leg',
@@ -141,6 +262,7 @@ export interface RunAnalysis {
     pullPoints: number;
   };
   sections: SectionAnalysis[];
+  pulls: PullAnalysis[];
   verdicts: Verdict[];
   /** The worst status of all verdicts. */
   status: Status;

@@ -1,8 +1,10 @@
 import type { Finding } from '../contracts/run-analysis';
 import { formatAngle } from '../units/format-angle';
+import { formatForce, formatLimit } from '../units/format-force';
 import { formatLength } from '../units/format-length';
 import { formatPercentBeside } from '../units/format-percent';
 import type { Say } from './create-words';
+import type { WordKey } from './word-key';
 
 /** What wording needs: the words, and what each place of the run is called. */
 export interface WordingContext {
@@ -24,6 +26,10 @@ const LENGTHS = new Set(
 );
 const RATIOS = new Set(['ratio', 'ratioWithOvality']);
 
+/** Checks whose figures are forces, lbf, or sidewall pressures, lb/ft. */
+const BY_FORCE = new Set(['tension', 'sidewall']);
+const EXACT = new Set('allowed caution stop strength needed puller'.split(' '));
+
 /** Checks whose `limit`, `over` and `length` are lengths, not degrees. */
 const BY_LENGTH = new Set(['length']);
 
@@ -34,15 +40,26 @@ const BY_LENGTH = new Set(['length']);
  */
 export function shownFigures(values: Figures, subject: string): Shown {
   const shown: Shown = {};
+  const ofPull = BY_FORCE.has(subject);
   for (const [name, value] of Object.entries(values)) {
     if (typeof value === 'string') shown[name] = value;
-    if (typeof value === 'number') shown[name] = shownFigure(name, value, BY_LENGTH.has(subject));
+    if (typeof value !== 'number') continue;
+    if (ofPull) shown[name] = shownForce(name, value, values);
+    else shown[name] = shownFigure(name, value, BY_LENGTH.has(subject));
   }
   const { percent, limitPercent } = values;
   if (typeof percent === 'number' && typeof limitPercent === 'number') {
     shown.percentOfLimit = formatPercentBeside(percent, limitPercent);
   }
   return shown;
+}
+
+/** Limits exactly, predictions rounded and never onto their limit, frictions to 0.01. */
+function shownForce(name: string, value: number, values: Figures): string {
+  if (name === 'friction') return value.toFixed(2);
+  if (EXACT.has(name)) return formatLimit(value);
+  const limit = values.allowed ?? values.stop;
+  return formatForce(value, typeof limit === 'number' ? limit : null);
 }
 
 function shownFigure(name: string, value: number, byLength: boolean): string | number {
@@ -52,6 +69,11 @@ function shownFigure(name: string, value: number, byLength: boolean): string | n
   if (LENGTHS.has(name)) return formatLength(value, { to: 16 });
   if (RATIOS.has(name)) return value.toFixed(2);
   return value;
+}
+
+/** A limit of a pull by its name, "conductors"; empty for every other limit. */
+export function pullLimitName({ limit }: Figures, say: Say): string {
+  return typeof limit === 'string' ? say(`findings.pullLimit.${limit}` as WordKey) : '';
 }
 
 /** Long lengths read to the inch. */

@@ -1,7 +1,7 @@
 import type { CodeEdition } from '../run/run-document';
 import type { Finding, RuleCitation } from '../contracts/run-analysis';
 import { checkOf } from '../checks/verdicts';
-import { shownFigures } from './figures';
+import { pullLimitName, shownFigures } from './figures';
 import type { WordingContext } from './figures';
 import type { Say } from './create-words';
 import type { WordKey } from './word-key';
@@ -59,7 +59,7 @@ function limitName({ values }: Finding, say: Say): string {
   if (typeof source === 'string' && source !== '') return source;
   return typeof limitFrom === 'string' && limitFrom !== 'count'
     ? say(`findings.limitFrom.${limitFrom}` as WordKey)
-    : '';
+    : pullLimitName(values, say);
 }
 
 function minimumName({ values }: Finding, say: Say): string {

@@ -1,6 +1,6 @@
 import type { CheckName, Verdict } from '../contracts/run-analysis';
 import { formatAngle } from '../units/format-angle';
-import { shownFigures } from './figures';
+import { pullLimitName, shownFigures } from './figures';
 import type { WordingContext } from './figures';
 import type { WordKey } from './word-key';
 
@@ -29,6 +29,20 @@ const KEY: Record<CheckName, (verdict: Verdict) => VerdictKey> = {
     if (status === 'over') return 'findings.verdict.clearance-over';
     if (typeof values.clearance !== 'number') return 'findings.verdict.clearance-many';
     return status === 'watch' ? 'findings.verdict.clearance-tight' : 'findings.verdict.clearance';
+  },
+  tension: ({ status, values }) => {
+    if (values.reason) return noPull(values);
+    if (values.finding === 'pull-in-two') return 'findings.verdict.pull-in-two';
+    if (values.finding === 'pull-no-reach') return 'findings.verdict.pull-no-reach';
+    if (values.finding === 'pull-hold-back') return 'findings.verdict.pull-hold-back';
+    if (values.finding === 'rope-too-weak') return 'findings.verdict.rope-too-weak';
+    if (status === 'over') return 'findings.verdict.tension-over';
+    return status === 'watch' ? 'findings.verdict.tension-watch' : 'findings.verdict.tension-ok';
+  },
+  sidewall: ({ status, values }) => {
+    if (values.reason) return noPull(values);
+    if (status === 'over') return 'findings.verdict.sidewall-over';
+    return status === 'watch' ? 'findings.verdict.sidewall-watch' : 'findings.verdict.sidewall-ok';
   },
   radius: ({ status }) => {
     if (status === 'over') return 'findings.verdict.radius-over';
@@ -60,6 +74,9 @@ const KEY: Record<CheckName, (verdict: Verdict) => VerdictKey> = {
   },
 };
 
+const noPull = (values: Verdict['values']): VerdictKey =>
+  `findings.verdict.no-pull.${String(values.reason)}` as VerdictKey;
+
 function noConductors(values: Verdict['values']): VerdictKey {
   return values.reason === 'no-size'
     ? 'findings.verdict.no-size'
@@ -79,6 +96,7 @@ export function wordVerdict(verdict: Verdict, { say, labelOf }: WordingContext):
   const words = {
     ...shownFigures(verdict.values, verdict.check),
     place: place === null ? '' : labelOf(place),
+    limitName: pullLimitName(verdict.values, say),
   };
   const key = KEY[verdict.check](verdict);
   return verdict.check === 'degrees' ? say(key, degreeFigures(verdict)) : say(key, words);

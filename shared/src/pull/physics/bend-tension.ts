@@ -1,0 +1,103 @@
+import type { BendWay, Load } from './load';
+import { solveSlope } from './solve-slope';
+
+/** Below this a bend lies in a level or an upright plane. */
+const FLAT = 1e-12;
+const TOLERANCE = 1e-10;
+/** Share of the bend in one step where the tension is held at 0: finds the place the cable goes slack closely enough. */
+const SLACK_STEP = 1 / 256;
+/** e to this is past every tension told apart, and still a number. */
+const MOST_TURN = 200;
+/** Past this nobody asks how much more, lbf. */
+const ENOUGH = 1e7;
+
+/**
+ * Tension leaving a bend in any plane, lbf: dT/dψ = W·R·t_z + f·|W·R·z⊥ − T·n|, t the heading, n the normal toward the
+ * centre, z up. The cable bears on the inner wall where the tension wins and on the outer wall where the weight does.
+ *
+ * Level plane: T·cosh fθ + √(T² + (WR)²)·sinh fθ. Upright plane while the tension wins all along: the four vertical forms
+ * in one. Everything else is integrated. At W·R = 0 it is T·e^(fθ).
+ *
+ * Source: equilibrium of a cable on a curve with friction; the level and vertical forms as handbooks print them, from
+ * memory, checked by integration.
+ *
+ * @example bendTension(0, { angle: Math.PI / 2, radius: 4, headingUp: 0, normalUp: 0 }, { weight: 5, friction: 0.35 }) // 11.5579
+ */
+export function bendTension(tension: number, way: BendWay, load: Load): number {
+  const { angle, headingUp, normalUp } = way;
+  const { friction } = load;
+  const heft = load.weight * way.radius;
+  const turn = Math.min(friction * angle, MOST_TURN);
+  if (heft === 0) return tension * Math.exp(turn);
+  if (isLevel(way)) {
+    return tension * Math.cosh(turn) + Math.hypot(tension, heft) * Math.sinh(turn);
+  }
+  // Falling at most W·R for each radian, a tension this high stays above the weight's part all along.
+  if (sidewaysUp(way) < FLAT && tension >= heft * (1 + angle)) {
+    const square = 1 + friction * friction;
+    const a = -((1 - friction * friction) * normalUp + 2 * friction * headingUp) / square;
+    const b = headingUp - friction * normalUp + friction * a;
+    return (
+      (tension - heft * a) * Math.exp(turn) + heft * (a * Math.cos(angle) + b * Math.sin(angle))
+    );
+  }
+  const slope = slopeOf(way, heft, friction);
+  const tolerance = TOLERANCE * (heft + tension);
+  return solveSlope(slope, tension, angle, { tolerance, enough: ENOUGH });
+}
+
+/**
+ * The least tension entering a bend that keeps the cable taut all along it and leaves it with `tension`, lbf.
+ *
+ * @example bendFeed(11.5579, { angle: Math.PI / 2, radius: 4, headingUp: 0, normalUp: 0 }, { weight: 5, friction: 0.35 }) // 0
+ */
+export function bendFeed(tension: number, way: BendWay, load: Load): number {
+  const { angle } = way;
+  const { friction } = load;
+  const heft = load.weight * way.radius;
+  if (heft === 0) return tension * Math.exp(-friction * angle);
+  if (isLevel(way)) {
+    const sinh = Math.sinh(friction * angle);
+    if (heft * sinh >= tension) return 0;
+    return tension * Math.cosh(friction * angle) - Math.hypot(tension, heft) * sinh;
+  }
+  if (tension === 0 && neverRunsAway(way, friction)) return 0;
+  const slope = slopeOf(way, heft, friction);
+  return solveSlope((back, held) => -slope(angle - back, held), tension, angle, {
+    tolerance: TOLERANCE * (heft + tension),
+    floor: 0,
+    longestStep: SLACK_STEP,
+  });
+}
+
+function slopeOf(way: BendWay, heft: number, friction: number) {
+  const { headingUp, normalUp } = way;
+  const across = heft * sidewaysUp(way);
+  return (turned: number, tension: number): number => {
+    const cos = Math.cos(turned);
+    const sin = Math.sin(turned);
+    const along = heft * (headingUp * cos + normalUp * sin);
+    const inward = heft * (normalUp * cos - headingUp * sin) - tension;
+    return along + friction * Math.hypot(inward, across);
+  };
+}
+
+const isLevel = ({ headingUp, normalUp }: BendWay): boolean =>
+  Math.abs(headingUp) < FLAT && Math.abs(normalUp) < FLAT;
+
+/** Upward part of the axis the bend turns about, unsigned. */
+function sidewaysUp({ headingUp, normalUp }: BendWay): number {
+  const square = 1 - headingUp * headingUp - normalUp * normalUp;
+  return square < FLAT ? 0 : Math.sqrt(square);
+}
+
+/** True where the bend is nowhere steeper downward than friction alone holds: tan α ≥ −f all along. */
+function neverRunsAway({ angle, headingUp, normalUp }: BendWay, friction: number): boolean {
+  const end = headingUp * Math.cos(angle) + normalUp * Math.sin(angle);
+  const steepest = -Math.hypot(headingUp, normalUp);
+  // The heading is steepest downward where it points away from its highest, half a turn on.
+  const at = Math.atan2(-normalUp, -headingUp);
+  const passes = at >= 0 && at <= angle;
+  const lowest = Math.min(headingUp, end, passes ? steepest : 1);
+  return lowest >= -friction / Math.sqrt(1 + friction * friction);
+}

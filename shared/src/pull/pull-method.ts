@@ -1,0 +1,47 @@
+import type { MethodAnswer, PullMethod } from '../contracts/run-analysis';
+import { frictionWhere, peaksAt } from './pull-direction';
+import type { DirectionInput, Peaks } from './pull-direction';
+import type { PullLimits } from './pulling-limits';
+import type { Band } from '../contracts/run-analysis';
+
+/** Pulled with one hand, lbf: judgement from published push and pull strengths. */
+export const EASY = 25;
+
+const HARDER: readonly PullMethod[] = ['easy', 'one', 'two', 'puller', 'not-as-drawn'];
+
+/** True where the first needs more than the second. */
+export function isHarder(one: PullMethod, other: PullMethod): boolean {
+  return HARDER.indexOf(one) > HARDER.indexOf(other);
+}
+
+/**
+ * Who pulls, by the most the head feels: to 25 lbf easy by hand, to `handOne` one person, to `handTwo` two people, else a
+ * puller; where a stop limit is passed, not as drawn.
+ *
+ * @example methodFor({ tension: 116, sidewall: 0 }, three 12 AWG) // 'puller'
+ */
+export function methodFor({ tension, sidewall }: Peaks, limits: PullLimits): PullMethod {
+  const { conductor, attachment, puller, rope, handOne, handTwo } = limits;
+  const most = Math.min(conductor, attachment, puller ?? Infinity, rope ?? Infinity);
+  if (tension > most || sidewall > limits.sidewall.stop) return 'not-as-drawn';
+  if (tension <= EASY) return 'easy';
+  if (tension <= handOne) return 'one';
+  return tension <= handTwo ? 'two' : 'puller';
+}
+
+/** The method at likely and at high friction, and the friction that flips it. */
+export function pullMethod(
+  input: DirectionInput,
+  friction: Band,
+  limits: PullLimits,
+): MethodAnswer {
+  const at = (mu: number) => methodFor(peaksAt(input, mu), limits);
+  const likely = at(friction.likely);
+  const flipsAt = frictionWhere((mu) => isHarder(at(mu), likely));
+  return {
+    likely,
+    high: at(friction.high),
+    flipsAt,
+    flipsTo: flipsAt === null ? null : at(flipsAt),
+  };
+}
