@@ -6,10 +6,11 @@ import { checkDirections } from './checks/directions';
 import { checkPull } from './checks/pulls';
 import { checkRadius } from './checks/radius';
 import { makeVerdicts, worstStatus } from './checks/verdicts';
-import type { Finding, RunAnalysis, Severity } from './contracts/run-analysis';
+import type { Assumed, Finding, RunAnalysis, Severity } from './contracts/run-analysis';
 import { DEFAULT_SETTINGS } from './contracts/settings';
 import type { CompanySettings } from './contracts/settings';
 import { analyzePulls } from './pull/analyze-pulls';
+import { assumedConditions, conditionsInForce } from './pull/conditions-in-force';
 import { assumedValues } from './run/assumed-values';
 import { expandRun } from './run/expand-run';
 import { InvalidRunError } from './run/invalid-run-error';
@@ -67,8 +68,18 @@ export function analyzeRun(
     verdicts,
     status: worstStatus(verdicts.map(({ status }) => status)),
     findings,
-    assumed: assumedValues(document, expanded, settings),
+    assumed: [
+      ...assumedValues(document, expanded, settings),
+      ...assumedOfPulls(document, settings),
+    ],
   };
+}
+
+/** Conditions matter once there is something to pull. */
+function assumedOfPulls(document: RunDocument, settings: CompanySettings): Assumed[] {
+  const { conductors = [] } = document;
+  if (conductors.length === 0) return [];
+  return assumedConditions(document, settings, conditionsInForce(document, settings, conductors));
 }
 
 const WORST_FIRST: readonly Severity[] = ['stop', 'caution', 'note'];

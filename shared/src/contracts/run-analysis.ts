@@ -22,6 +22,7 @@ export interface Fix {
     | 'change-angle'
     | 'add-pull-point'
     | 'make-accessible'
+    | 'break-pull'
     | 'larger-raceway'
     | 'longer-leg'
     | 'larger-radius';

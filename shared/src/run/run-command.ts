@@ -3,6 +3,8 @@ import type {
   ConductorGroup,
   Environment,
   PathElement,
+  PlannedPull,
+  PullConditions,
   Raceway,
   Rules,
   RunDocument,
@@ -20,6 +22,10 @@ export type RunCommand =
   | { command: 'set-sets'; args: { sets: number } }
   | { command: 'set-environment'; args: { environment: Environment } }
   | { command: 'set-circuit'; args: { circuit: Circuit } }
+  /** All of them; a field given as undefined goes back to the company's or the default. */
+  | { command: 'set-conditions'; args: { conditions: PullConditions } }
+  /** The whole plan; a section no pull covers is pulled by itself. */
+  | { command: 'set-pulls'; args: { pulls: PlannedPull[] } }
   /** `afterId` null: at the start. */
   | { command: 'insert-elements'; args: { afterId: string | null; elements: PathElement[] } }
   /** Fields given replace; a field given as undefined is removed; `kind` and `id` never change. */

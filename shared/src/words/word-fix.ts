@@ -1,5 +1,6 @@
 import type { Fix } from '../contracts/run-analysis';
 import { formatAngle } from '../units/format-angle';
+import { formatForce } from '../units/format-force';
 import { formatLength } from '../units/format-length';
 import { formatPercentBeside } from '../units/format-percent';
 import type { FixValues } from '../checks/suggest-fixes/fix-values';
@@ -43,6 +44,16 @@ const WORDING: Wording = {
   'make-accessible': (values, { say, labelOf }) => ({
     act: say('findings.fix.make-accessible', { name: values.name ?? labelOf(values.elementId) }),
     result: say('findings.result.reach', halves(values)),
+  }),
+  'break-pull': ({ elementId, first, second }, { say, labelOf }) => ({
+    act: say('findings.fix.break-pull', { place: labelOf(elementId) }),
+    result:
+      first === null || second === null
+        ? say('findings.result.two-pulls')
+        : say('findings.result.pounds', {
+            first: formatForce(first),
+            second: formatForce(second),
+          }),
   }),
   'larger-raceway': (values, { say }) => ({
     act: say('findings.fix.larger-raceway', { tradeSize: values.tradeSize, raceway: values.type }),

@@ -40,7 +40,7 @@ const KEY: Record<CheckName, (verdict: Verdict) => VerdictKey> = {
     return status === 'watch' ? 'findings.verdict.tension-watch' : 'findings.verdict.tension-ok';
   },
   sidewall: ({ status, values }) => {
-    if (values.reason) return noPull(values);
+    if (values.reason) return 'findings.verdict.sidewall-none';
     if (status === 'over') return 'findings.verdict.sidewall-over';
     return status === 'watch' ? 'findings.verdict.sidewall-watch' : 'findings.verdict.sidewall-ok';
   },

@@ -41,7 +41,7 @@ export interface TriedFix {
 }
 
 /** Findings about a whole section; all others are about one piece. */
-const OF_SECTION = /^(degrees|fill|jam|clearance|length)-/;
+const OF_SECTION = /^(degrees|fill|jam|clearance|length|tension|sidewall|pull)-/;
 
 /**
  * Carries a candidate out and analyses the run again. null unless the finding is gone and no stop came in its place; what
@@ -117,12 +117,19 @@ function placeOf({ code, at }: Finding, { analysis }: FixContext, origin: Findin
 function deltaOf({ analysis }: FixContext, { at }: Finding, outcome: Outcome): Fix['delta'] {
   const section = analysis.sections.find(({ id }) => id === at.sectionId);
   const worst = Math.max(...outcome.sections.map(({ degrees }) => degrees));
+  const [pullBefore, pullAfter] = [worstPull(analysis), worstPull(outcome.analysis)];
   const [now, then] = [analysis.totals.length, outcome.analysis.totals.length];
   return {
     degrees: section && Number.isFinite(worst) ? worst - section.degrees : null,
-    lbf: null,
+    lbf: pullBefore === null || pullAfter === null ? null : pullAfter - pullBefore,
     inches: now === null || then === null ? null : then - now,
   };
+}
+
+/** Likely pull of the hardest pull that has an answer, lbf; null where none has. */
+function worstPull({ pulls }: RunAnalysis): number | null {
+  const answered = pulls.flatMap((pull) => pull[pull.planned].peak?.likely ?? []);
+  return answered.length === 0 ? null : Math.max(...answered);
 }
 
 /** The run before a change, laid out. */

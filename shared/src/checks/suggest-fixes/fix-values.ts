@@ -40,6 +40,13 @@ export type FixValues = {
     /** Always true: only if the cover can be reached. */
     onlyIfReachable: true;
   };
+  'break-pull': {
+    /** The box the pull goes through now. */
+    elementId: string;
+    /** Likely pull of both parts, lbf; null where one has no answer. */
+    first: number | null;
+    second: number | null;
+  };
   'larger-raceway': {
     type: RacewayType;
     tradeSize: TradeSize;

@@ -12,6 +12,7 @@ import { fixFill } from './fix-fill';
 import { fixJam } from './fix-jam';
 import { fixLeg } from './fix-leg';
 import { fixLength } from './fix-length';
+import { fixPull } from './fix-pull';
 import { fixRadius } from './fix-radius';
 import { fixSaddle } from './fix-saddle';
 
@@ -26,6 +27,11 @@ const MAKERS: Partial<Record<FindingCode, (context: FixContext, finding: Finding
     'jam-possible': fixJam,
     'clearance-tight': fixClearance,
     'clearance-negative': fixClearance,
+    'pull-in-two': fixPull,
+    'pull-set-changes': fixPull,
+    'pull-turns-without-sheave': fixPull,
+    'tension-over': fixPull,
+    'tension-over-if-dry': fixPull,
     'radius-too-tight': fixRadius,
     'leg-too-short': fixLeg,
     'saddle-too-low': fixSaddle,

@@ -32,6 +32,10 @@ export function applyCommand(document: RunDocument, command: RunCommand): RunDoc
       return { ...document, environment: sparse(command.args.environment) };
     case 'set-circuit':
       return { ...document, circuit: sparse(command.args.circuit) };
+    case 'set-conditions':
+      return withField(document, 'conditions', someOf(sparse(command.args.conditions)));
+    case 'set-pulls':
+      return withField(document, 'pulls', someOf(command.args.pulls));
     case 'insert-elements':
       return insertElements(document, command.args.afterId, command.args.elements);
     case 'set-element':
@@ -51,6 +55,11 @@ export function applyCommand(document: RunDocument, command: RunCommand): RunDoc
     case 'remove-conductors':
       return removeConductors(document, command.args.groupId);
   }
+}
+
+/** Nothing in it is nothing given. */
+function someOf<T extends object>(value: T): T | undefined {
+  return Object.keys(value).length === 0 ? undefined : value;
 }
 
 /** Carries out several edits in order; all or, where one is refused, none. */

@@ -25,6 +25,10 @@ export function describeCommand(document: RunDocument, command: RunCommand): Edi
       return label('environment');
     case 'set-circuit':
       return label('circuit');
+    case 'set-conditions':
+      return label('conditions');
+    case 'set-pulls':
+      return label('pulls');
     case 'insert-elements':
       return describeInsert(document, command.args.afterId, command.args.elements);
     case 'set-element':

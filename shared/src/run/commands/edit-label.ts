@@ -9,6 +9,8 @@ export const EDIT_KEYS = [
   'sets',
   'environment',
   'circuit',
+  'conditions',
+  'pulls',
   'add',
   'addSeveral',
   'angle',

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import type { UIEvent } from 'react';
+import type { ReactNode, UIEvent } from 'react';
 import type { Place } from './commands/commands';
 import { useCommands } from './commands/commands-context';
 import { ConductorsTab } from './conductors/conductors-tab';
@@ -11,6 +11,7 @@ import { AddRow } from './list/add-row';
 import listClasses from './list/list.module.css';
 import { PieceList } from './list/piece-list';
 import { PanelBoundary } from './panel-boundary';
+import { PullTab } from './pull/pull-tab';
 import { SelectedPiece } from './rail/selected-piece';
 import { SketchPanel } from './rail/sketch-panel';
 import { ToFix } from './rail/to-fix';
@@ -25,6 +26,12 @@ interface Props {
 
 /** px the list gains when the strip shrinks, and a little more, so that it can still be scrolled then. */
 const ROOM_TO_SHRINK = 220;
+
+const PARTS: Record<Place, ReactNode> = {
+  layout: <Layout />,
+  conductors: <ConductorsTab />,
+  pull: <PullTab />,
+};
 
 /** The run editor at a desk. */
 export function DeskWorkbench({ place, onOpen }: Props) {
@@ -46,9 +53,7 @@ export function DeskWorkbench({ place, onOpen }: Props) {
               <VerdictRow onGo={goToPiece} />
             </PanelBoundary>
           </div>
-          <div className={classes.deskMain}>
-            {place === 'layout' ? <Layout /> : <ConductorsTab />}
-          </div>
+          <div className={classes.deskMain}>{PARTS[place]}</div>
           <div className={classes.rail}>
             <PanelBoundary>
               <ToFix onGo={goToPiece} />

@@ -23,6 +23,7 @@ export const SHORTCUTS: readonly Shortcut[] = [
   { command: 'deselect', key: 'Escape' },
   { command: 'layout', key: '1' },
   { command: 'conductors', key: '2' },
+  { command: 'pull', key: '3' },
   { command: 'keys', key: '?' },
   { command: 'add-bend-90', key: 'b' },
   { command: 'add-kick-45', key: 'k' },

@@ -5,7 +5,7 @@ import { pieceIds, pieceOf } from '../model/list-rows';
 import { ADD_KEYS } from '../model/new-pieces';
 import type { AddKey } from '../model/new-pieces';
 
-export const PLACES = ['layout', 'conductors'] as const;
+export const PLACES = ['layout', 'conductors', 'pull'] as const;
 export type Place = (typeof PLACES)[number];
 
 /** What a command may reach beyond the run itself. */
@@ -27,6 +27,7 @@ export type CommandId =
   | 'deselect'
   | 'layout'
   | 'conductors'
+  | 'pull'
   | 'keys'
   | `add-${AddKey}`;
 
@@ -163,6 +164,7 @@ export const COMMANDS: readonly EditorCommand[] = [
     isEnabled: always,
     act: (_, around) => around.goTo('conductors'),
   },
+  { id: 'pull', group: 'move', isEnabled: always, act: (_, around) => around.goTo('pull') },
   { id: 'keys', group: 'move', isEnabled: always, act: (_, around) => around.showKeys() },
   ...ADD_KEYS.map((key): EditorCommand => ({
     id: `add-${key}`,

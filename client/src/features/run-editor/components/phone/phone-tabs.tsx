@@ -20,7 +20,7 @@ export function PhoneTabs({ place }: { place: Place }) {
           aria-controls="workbench-panel"
           onClick={() => goTo(option)}
         >
-          {say(option === 'layout' ? 'workbench.tab.layout' : 'workbench.tab.wires')}
+          {say(option === 'conductors' ? 'workbench.tab.wires' : `workbench.tab.${option}`)}
         </button>
       ))}
     </div>

@@ -10,6 +10,7 @@ import { LengthKeypad } from '../keypad/length-keypad';
 import { PanelBoundary } from '../panel-boundary';
 import { StripPanel } from '../strip/strip-panel';
 import { WorstVerdict } from '../verdicts/worst-verdict';
+import { PullTab } from '../pull/pull-tab';
 import { Ledger } from './ledger';
 import classes from './phone.module.css';
 import { PhoneActs } from './phone-acts';
@@ -71,7 +72,9 @@ function PhoneFrame({ place, view, onView, onOpen }: Props) {
           hidden={isTyping}
         >
           <PanelBoundary>
-            {isLayout ? <PhoneMiddle view={view} onView={onView} /> : <ConductorsTab />}
+            {isLayout && <PhoneMiddle view={view} onView={onView} />}
+            {place === 'conductors' && <ConductorsTab />}
+            {place === 'pull' && <PullTab />}
           </PanelBoundary>
         </div>
         {isTyping && <div className={classes.body} />}

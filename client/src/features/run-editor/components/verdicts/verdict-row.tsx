@@ -10,7 +10,7 @@ import frame from '../workbench.module.css';
 import classes from './verdicts.module.css';
 
 /** What is asked of every run, in the row whatever the answer. */
-const ALWAYS: readonly CheckName[] = ['degrees', 'fill', 'jam'];
+const ALWAYS: readonly CheckName[] = ['degrees', 'tension', 'fill', 'jam', 'sidewall'];
 /** In the row where they are not met; met, they stand together behind one button. */
 const WHEN_NOT_MET: readonly CheckName[] = [
   'access',
