@@ -52,8 +52,9 @@ export function lowestLimit(limits: NonNullable<PullAnalysis['limits']>): {
   return named.reduce((least, each) => (each.allowed < least.allowed ? each : least));
 }
 
-function tension({ answer, input }: CheckedPull): Finding[] {
+function tension({ answer, inputs }: CheckedPull): Finding[] {
   const { limits, planned } = answer;
+  const input = inputs?.[planned];
   const { peak } = answer[planned];
   if (!limits || !peak || !input) return [];
   const { limit, allowed } = lowestLimit(limits);

@@ -20,8 +20,8 @@ import { refusalOf } from './refusal';
 /** A pull with what its checks ask again at other frictions. */
 export interface CheckedPull {
   answer: PullAnalysis;
-  /** The planned direction, where it has figures. */
-  input: DirectionInput | null;
+  /** Both directions, where they have figures. */
+  inputs: Record<'forward' | 'reverse', DirectionInput> | null;
 }
 
 /** Every pull of a run: those planned, and one for each section else. */
@@ -69,7 +69,7 @@ export function analyzePull(context: CheckContext, span: PullSpan): CheckedPull 
   const planned = asked ?? recommended ?? easier(forward, reverse);
   const input = inputs?.[planned] ?? null;
   return {
-    input,
+    inputs,
     answer: {
       id: pull.id,
       from: pull.from,

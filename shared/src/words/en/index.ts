@@ -1,10 +1,11 @@
 import app from './app.json';
 import auth from './auth.json';
 import edits from './edits.json';
+import explain from './explain.json';
 import findings from './findings.json';
 import jobs from './jobs.json';
 import strip from './strip.json';
 import workbench from './workbench.json';
 
 /** Every English word a person reads, by the area it belongs to. */
-export const en = { app, auth, edits, findings, jobs, strip, workbench };
+export const en = { app, auth, edits, explain, findings, jobs, strip, workbench };

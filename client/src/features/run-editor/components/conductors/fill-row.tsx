@@ -1,8 +1,9 @@
-import { formatPercent } from '@fairlead/shared';
+import { explainFill, explainJam, formatPercent } from '@fairlead/shared';
 import type { SectionAnalysis, Status } from '@fairlead/shared';
 import { StatusGlyph } from '../../../../components/drawing/status-glyph';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
+import { Explained } from '../explain/explained';
 import { useLabelOf } from '../hooks/use-labels';
 import { wordRaceway } from '../model/word-piece';
 import { areaText, clearanceText, ratioText, roomLeft } from '../model/fill-text';
@@ -15,6 +16,8 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
   const { say } = useWords();
   const labelOf = useLabelOf();
   const findings = useRunEditor((state) => state.findings);
+  const document = useRunEditor((state) => state.document);
+  const expanded = useRunEditor((state) => state.expanded);
   const { fill, noFill, jam, clearance } = section;
   const here = findings.filter(({ at }) => at.sectionId === section.id);
   const status: Status = here.some(({ code }) => OVER.has(code)) ? 'over' : 'ok';
@@ -39,6 +42,17 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
     );
   }
   const room = roomLeft(fill);
+  const jamWords =
+    jam?.risk === 'possible'
+      ? say('workbench.conductors.jamPossible', {
+          ratio: ratioText(jam.ratio),
+          oval: ratioText(jam.ratioWithOvality),
+        })
+      : say('workbench.conductors.jamClear');
+  const percent = say('workbench.conductors.percentOf', {
+    percent: formatPercent(fill.percent).replace(/\s*%$/, ''),
+    limit: formatPercent(fill.limitPercent),
+  });
   return (
     <tr data-section={section.id}>
       <th scope="row">{name}</th>
@@ -46,10 +60,9 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
       <td {...cell('fill')}>
         <span className={classes.fillLine}>
           <StatusGlyph status={status} size={18} />
-          {say('workbench.conductors.percentOf', {
-            percent: formatPercent(fill.percent).replace(/\s*%$/, ''),
-            limit: formatPercent(fill.limitPercent),
-          })}
+          <Explained name={percent} explain={() => explainFill(document, expanded, section)}>
+            {percent}
+          </Explained>
           {status === 'over' && ` ${say('workbench.conductors.percentOver')}`}
         </span>
         <small>
@@ -69,14 +82,13 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
               .join(', ')}
       </td>
       <td {...cell('jam')}>
-        {jam === null
-          ? say('workbench.conductors.jamNone')
-          : jam.risk === 'clear'
-            ? say('workbench.conductors.jamClear')
-            : say('workbench.conductors.jamPossible', {
-                ratio: ratioText(jam.ratio),
-                oval: ratioText(jam.ratioWithOvality),
-              })}
+        {jam === null ? (
+          say('workbench.conductors.jamNone')
+        ) : (
+          <Explained name={jamWords} explain={() => explainJam(section)}>
+            {jamWords}
+          </Explained>
+        )}
       </td>
       <td {...cell('clearance')}>
         {clearance === null

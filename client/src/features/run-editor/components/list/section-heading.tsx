@@ -1,7 +1,9 @@
-import { formatAngle } from '@fairlead/shared';
+import { explainDegrees, formatAngle } from '@fairlead/shared';
 import type { SectionAnalysis } from '@fairlead/shared';
 import { StatusGlyph } from '../../../../components/drawing/status-glyph';
 import { useWords } from '../../../../hooks/use-words';
+import { Explained } from '../explain/explained';
+import { useEdition } from '../hooks/use-edition';
 import { useLabelOf } from '../hooks/use-labels';
 import { wordRemaining } from '../model/word-remaining';
 import classes from './list.module.css';
@@ -11,6 +13,11 @@ export function SectionLine({ section }: { section: SectionAnalysis }) {
   const { say } = useWords();
   const labelOf = useLabelOf();
   const remaining = wordRemaining(section, say);
+  const edition = useEdition();
+  const degrees = say('workbench.list.sectionDegrees', {
+    degrees: formatAngle(section.degrees),
+    limit: formatAngle(section.limitDegrees),
+  });
   return (
     <span className={classes.sectionLine}>
       <span>
@@ -18,10 +25,9 @@ export function SectionLine({ section }: { section: SectionAnalysis }) {
       </span>
       <span className={classes.sectionAnswer}>
         {remaining.isOver && <StatusGlyph status="over" size={18} />}
-        {say('workbench.list.sectionDegrees', {
-          degrees: formatAngle(section.degrees),
-          limit: formatAngle(section.limitDegrees),
-        })}
+        <Explained name={degrees} explain={() => explainDegrees(section, edition)}>
+          {degrees}
+        </Explained>
         {', '}
         {remaining.words}
       </span>
