@@ -1,7 +1,7 @@
 import { Popover } from '@mantine/core';
 import type { Explanation, WordKey } from '@fairlead/shared';
 import type { ReactNode } from 'react';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { useWords } from '../../../../hooks/use-words';
 import classes from './explain.module.css';
 
@@ -18,12 +18,25 @@ interface Props {
 export function Explained({ children, name, explain }: Props) {
   const { say } = useWords();
   const [opened, setOpened] = useState<Explanation | null>(null);
+  const isOpen = opened !== null;
+  // Wherever the focus is by then, Esc closes this and nothing under it.
+  useEffect(() => {
+    if (!isOpen) return undefined;
+    const close = (event: KeyboardEvent) => {
+      if (event.key !== 'Escape') return;
+      event.stopPropagation();
+      setOpened(null);
+    };
+    window.addEventListener('keydown', close, { capture: true });
+    return () => window.removeEventListener('keydown', close, { capture: true });
+  }, [isOpen]);
   return (
     <Popover
-      opened={opened !== null}
-      onChange={(isOpen) => !isOpen && setOpened(null)}
+      opened={isOpen}
+      onChange={(stays) => !stays && setOpened(null)}
       position="bottom-start"
       shadow="none"
+      closeOnEscape={false}
       trapFocus
       returnFocus
     >
