@@ -8,6 +8,7 @@ import { AccessCheck } from './common/access/access-check';
 import { ApiErrorFilter } from './common/filters/api-error.filter';
 import { AccessGuard } from './common/guards/access.guard';
 import { createValidationPipe } from './common/pipes/validation.pipe';
+import { CompanyModule } from './company/company.module';
 import { ConfigModule } from './config/config.module';
 import type { AppConfig } from './config/environment';
 import { loggerOptions } from './config/logger-options';
@@ -36,6 +37,7 @@ export class AppModule {
         IdempotencyModule,
         AuthModule,
         PeopleModule,
+        CompanyModule,
         JobsModule,
         RunsModule,
         HealthModule,

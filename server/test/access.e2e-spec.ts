@@ -33,6 +33,8 @@ const EXPECTED: Record<string, 'public' | 'signed-in' | readonly Role[]> = {
   'POST /auth/refresh': 'public',
   'POST /auth/sign-out': 'public',
   'GET /me': 'signed-in',
+  'GET /company': ROLES,
+  'PUT /company/settings': ['owner'],
   'GET /people': OFFICE,
   'GET /jobs': ROLES,
   'POST /jobs': OFFICE,

@@ -26,11 +26,14 @@ async function schema(): Promise<Record<string, string>> {
   return statements;
 }
 
+/** Every step makes one, but 012, which adds columns. */
+const TABLES = MIGRATIONS.length - 1;
+
 it('go up, down and up again to the same schema', async () => {
   const names = MIGRATIONS.map(({ name }) => name);
   expect(await migrateUp(database)).toEqual(names);
   const first = await schema();
-  expect(Object.keys(first)).toHaveLength(names.length);
+  expect(Object.keys(first)).toHaveLength(TABLES);
   expect(await migrateUp(database)).toEqual([]);
   expect((await migrateDown(database)).reverse()).toEqual(names);
   expect(await schema()).toEqual({});
@@ -51,7 +54,8 @@ it('carry on where a killed process stopped between a table and its note', async
   await onServer((query) =>
     query(`DELETE FROM ${database.name}.schema_migrations WHERE name >= '008'`),
   );
-  expect(await migrateUp(database)).toHaveLength(4);
+  const later = MIGRATIONS.filter(({ name }) => name >= '008').length;
+  expect(await migrateUp(database)).toHaveLength(later);
   expect(await schema()).toEqual(whole);
 });
 

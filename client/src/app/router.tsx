@@ -34,6 +34,7 @@ export const router = createBrowserRouter([
                 children: [
                   { path: paths.jobs, lazy: page(() => import('../pages/jobs-page')) },
                   { path: paths.job(':jobId'), lazy: page(() => import('../pages/job-page')) },
+                  { path: paths.company, lazy: page(() => import('../pages/company-page')) },
                   { path: paths.me, lazy: page(() => import('../pages/me-page')) },
                 ],
               },

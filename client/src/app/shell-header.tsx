@@ -23,6 +23,9 @@ export function ShellHeader() {
         <NavLink to={paths.jobs} className={classes.place}>
           {say('app.nav.jobs')}
         </NavLink>
+        <NavLink to={paths.company} className={classes.place}>
+          {say('company.nav')}
+        </NavLink>
       </nav>
       <span className={classes.shop}>{me?.company.name}</span>
       <div className={classes.themeSwitch}>

@@ -5,5 +5,6 @@ export const paths = {
   jobs: '/jobs',
   job: (jobId: string) => `/jobs/${jobId}`,
   run: (jobId: string, runId: string) => `/jobs/${jobId}/runs/${runId}`,
+  company: '/company',
   me: '/me',
 } as const;

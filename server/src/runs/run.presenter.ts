@@ -1,4 +1,4 @@
-import type { Run, RunAnalysis, RunDocument, RunListItem } from '@fairlead/shared';
+import type { Run, RunListItem } from '@fairlead/shared';
 import type { Viewer } from '../common/viewer';
 import type { JobFacts } from '../jobs/job.policy';
 import type { Job as JobRow } from '../jobs/models/job.model';
@@ -8,6 +8,7 @@ import { revisionLetter } from './revision-letter';
 import { summaryOf } from './revision-columns';
 import { canDeleteRun, canUpdateRun } from './run.policy';
 import type { RunFacts } from './run.policy';
+import type { AnalyzedDocument } from './analyze-document';
 import type { ListedRun } from './run-queries';
 
 /** A run with what stands in other tables. */
@@ -21,7 +22,7 @@ export interface RunView {
 
 export function presentRun(
   { run, revision, job, jobFacts, savedByName }: RunView,
-  { document, analysis }: { document: RunDocument; analysis: RunAnalysis },
+  { document, analysis, settings }: AnalyzedDocument,
   viewer: Viewer,
 ): Run {
   return {
@@ -41,6 +42,7 @@ export function presentRun(
       savedBy: savedByName,
     },
     analysis,
+    settings,
     can: presentCan(viewer, { job: jobFacts, state: revision.state }),
   };
 }

@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { SequelizeModule } from '@nestjs/sequelize';
+import { CompanySettingsModule } from '../company/company-settings.module';
 import { JobsModule } from '../jobs/jobs.module';
 import { PeopleModule } from '../people/people.module';
 import { EngineUpgradeService } from './engine-upgrade.service';
@@ -10,7 +11,12 @@ import { RunsController } from './runs.controller';
 import { RunsService } from './runs.service';
 
 @Module({
-  imports: [SequelizeModule.forFeature([Run, RunRevision]), JobsModule, PeopleModule],
+  imports: [
+    SequelizeModule.forFeature([Run, RunRevision]),
+    CompanySettingsModule,
+    JobsModule,
+    PeopleModule,
+  ],
   controllers: [RunsController],
   providers: [EngineUpgradeService, RunQueries, RunsService],
   exports: [EngineUpgradeService, RunsService],

@@ -16,6 +16,7 @@ import { readSort } from '../common/lists/keyset';
 import { pageOf } from '../common/lists/page-of';
 import { newId } from '../common/new-id';
 import type { Viewer } from '../common/viewer';
+import { CompanySettingsService } from '../company/company-settings.service';
 import { Transactions } from '../database/transactions';
 import { canCreateRuns } from '../jobs/job.policy';
 import { JobsService, factsOf } from '../jobs/jobs.service';
@@ -41,6 +42,7 @@ export class RunsService {
     private readonly queries: RunQueries,
     private readonly jobs: JobsService,
     private readonly people: PeopleService,
+    private readonly settings: CompanySettingsService,
     private readonly transactions: Transactions,
   ) {}
 
@@ -62,8 +64,8 @@ export class RunsService {
   async create(viewer: Viewer, jobId: string, body: CreateRunBody): Promise<RunAnswer> {
     const job = await this.jobs.load(viewer, jobId);
     if (!canCreateRuns(viewer, factsOf(job))) throw forbidden();
-    const analyzed = readDocument(body.document);
     const { companyId, userId } = viewer;
+    const analyzed = readDocument(body.document, await this.settings.of(companyId));
     const revisionId = newId();
     const now = new Date();
     await this.unlessTaken(body, () =>
@@ -100,7 +102,7 @@ export class RunsService {
   async save(viewer: Viewer, runId: string, body: SaveRunBody): Promise<RunAnswer> {
     const view = await this.load(viewer, runId);
     if (!canUpdateRun(viewer, factsOfRun(view))) throw forbidden();
-    const analyzed = readDocument(body.document);
+    const analyzed = readDocument(body.document, await this.settings.of(viewer.companyId));
     const saved = await this.unlessTaken({ ...body, id: runId }, async () => {
       const [count] = await this.revisions.update(
         {
@@ -187,8 +189,9 @@ export class RunsService {
     return { run, revision, job: jobView.job, jobFacts, savedByName };
   }
 
-  private present(view: RunView, viewer: Viewer): RunAnswer {
-    return presentRun(view, analyzeDocument(view.revision.document), viewer);
+  private async present(view: RunView, viewer: Viewer): Promise<RunAnswer> {
+    const settings = await this.settings.of(viewer.companyId);
+    return presentRun(view, analyzeDocument(view.revision.document, settings), viewer);
   }
 
   /** The database decides whether a tag or an id is free, so that two requests cannot both take it. */

@@ -1,5 +1,6 @@
 import type { RunDocument } from '../run/run-document';
 import type { RunAnalysis, RunSummary, Status } from './run-analysis';
+import type { CompanySettings } from './settings';
 
 export const REVISION_STATES = ['draft', 'checked', 'released', 'pulled', 'superseded'] as const;
 export type RevisionState = (typeof REVISION_STATES)[number];
@@ -45,6 +46,8 @@ export interface Run {
     savedBy: string;
   };
   analysis: RunAnalysis;
+  /** What the analysis was made with; an editor analyses with the same. */
+  settings: CompanySettings;
   can: RunCan;
 }
 

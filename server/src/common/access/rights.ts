@@ -8,6 +8,8 @@ const EVERYONE: readonly Role[] = ['owner', 'estimator', 'foreman', 'crew'];
  * drafts can be edited) is for the policy beside the model.
  */
 export const RIGHTS = {
+  'company.read': EVERYONE,
+  'company.settings': ['owner'],
   'people.list': OFFICE_AND_FOREMAN,
   'job.read': EVERYONE,
   'job.create': OFFICE_AND_FOREMAN,

@@ -10,6 +10,7 @@ import { jobs } from './008-jobs';
 import { jobPeople } from './009-job-people';
 import { runs } from './010-runs';
 import { runRevisions } from './011-run-revisions';
+import { companySettings } from './012-company-settings';
 
 /** In the order they run. A landed step never changes; the next one is added below. */
 export const MIGRATIONS: readonly Migration[] = [
@@ -24,4 +25,5 @@ export const MIGRATIONS: readonly Migration[] = [
   jobPeople,
   runs,
   runRevisions,
+  companySettings,
 ];

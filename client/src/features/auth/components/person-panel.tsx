@@ -1,8 +1,10 @@
 import { Button, NativeSelect } from '@mantine/core';
+import { Link } from 'react-router-dom';
 import { useTheme } from '../../../hooks/use-theme';
 import { useWords } from '../../../hooks/use-words';
 import { chooseDensity, chooseTheme, DENSITY_CHOICES, THEME_CHOICES } from '../../../lib/device';
 import type { DensityChoice, ThemeChoice } from '../../../lib/device';
+import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
 import classes from './auth.module.css';
 
@@ -43,6 +45,9 @@ export function PersonPanel({ onSignOut }: { onSignOut: () => void }) {
         value={densityChoice}
         onChange={(event) => chooseDensity(event.currentTarget.value as DensityChoice)}
       />
+      <Button variant="default" component={Link} to={paths.company}>
+        {say('company.title')}
+      </Button>
       <Button variant="default" onClick={onSignOut}>
         {say('auth.person.signOut')}
       </Button>

@@ -1,4 +1,3 @@
-import { DEFAULT_SETTINGS } from '@fairlead/shared';
 import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import { useAfter } from '../../../hooks/use-after';
@@ -27,8 +26,8 @@ export function RunEditor({ jobId, runId }: { jobId: string; runId: string }) {
   }
   if (!run || !scope) return <Opening />;
   return (
-    <SettingsContext.Provider value={DEFAULT_SETTINGS}>
-      <RunEditorSession run={run} settings={DEFAULT_SETTINGS} scope={scope} opening={<Opening />}>
+    <SettingsContext.Provider value={run.settings}>
+      <RunEditorSession run={run} settings={run.settings} scope={scope} opening={<Opening />}>
         <OpenRun />
       </RunEditorSession>
     </SettingsContext.Provider>

@@ -1,4 +1,4 @@
-import { analyzeRun, buildRun } from '@fairlead/shared';
+import { DEFAULT_SETTINGS, analyzeRun, buildRun } from '@fairlead/shared';
 import type { Run, RunDocument } from '@fairlead/shared';
 
 /** A run as the server answers it: a draft at version 1 that may be edited, unless told otherwise. */
@@ -25,6 +25,7 @@ export function buildRunAnswer(
       ...revision,
     },
     analysis: analyzeRun(document),
+    settings: DEFAULT_SETTINGS,
     can: { update: true, delete: true },
     ...overrides,
   };
