@@ -69,8 +69,10 @@ describe.each(THEMES)('in the %s theme', (theme) => {
     await visit('/jobs?search=nothing-like-it');
     await visit(jobPath);
     await visit('/me');
+    await visit('/company');
     await visit(runPath);
     await visit(`${runPath}?tab=conductors`);
+    await visit(`${runPath}?tab=pull`);
     await visit(`${runPath}?piece=offset1`);
     await visit(emptyRunPath);
   });
