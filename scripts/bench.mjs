@@ -6,6 +6,7 @@ import { join } from 'node:path';
 import { benchAnalysis } from './bench/analysis.mjs';
 import { benchKeystroke } from './bench/keystroke.mjs';
 import { benchList } from './bench/list.mjs';
+import { benchPull } from './bench/pull.mjs';
 import { build } from './build.mjs';
 import { migrate, seedDemo, serverEnv, startDatabase, startServer } from './lib/app.mjs';
 import { anyFreePort } from './lib/ports.mjs';
@@ -26,6 +27,7 @@ async function bench() {
   await step('build', build);
   say();
   await benchAnalysis();
+  await benchPull();
   say((await must('node', ['scripts/check-size.mjs'])).replace(/^figure: /gm, '').trim());
   // What is measured reads; only filling it writes.
   const db = await startDatabase(folder, { relaxed: true });

@@ -61,7 +61,7 @@ function tension({ answer, inputs }: CheckedPull): Finding[] {
   const values = { likely: peak.likely, high: peak.high, allowed, limit };
   if (peak.likely > allowed) return [found(answer, 'tension-over', 'stop', values)];
   if (peak.high <= allowed) return [];
-  const friction = frictionWhere((mu) => peaksAt(input, mu).tension > allowed);
+  const friction = frictionWhere((mu) => peaksAt(input, mu).tension, allowed);
   return [found(answer, 'tension-over-if-dry', 'caution', { ...values, friction })];
 }
 

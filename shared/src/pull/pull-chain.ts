@@ -12,6 +12,8 @@ export interface SectionLoad {
 /** Tensions are told up to here: nothing pulls harder, lbf. */
 export const MOST_TENSION = 1e6;
 
+const NO_LOAD: Load = { weight: 0, friction: 0 };
+
 export interface PullChain {
   /** lbf at the feed: what was given, or the hold-back where that is more. */
   feed: number;
@@ -29,16 +31,17 @@ export interface PullChain {
  */
 export function pullChain(
   pieces: readonly PullPiece[],
-  loads: readonly SectionLoad[],
+  loads: readonly (SectionLoad | undefined)[],
   friction: number,
   given: number,
 ): PullChain {
-  const loadOf = (piece: PullPiece): Load => {
-    const { weight, weightCorrection } = loads[piece.section] ?? { weight: 0, weightCorrection: 1 };
-    return { weight, friction: friction * weightCorrection };
-  };
+  const atFriction = loads.map((load): Load => ({
+    weight: load?.weight ?? 0,
+    friction: friction * (load?.weightCorrection ?? 1),
+  }));
+  const loadOf = (piece: PullPiece): Load => atFriction[piece.section] ?? NO_LOAD;
   let needed = 0;
-  for (let index = pieces.length - 1; index >= 0; index -= 1) {
+  for (let index = lastFall(pieces); index >= 0; index -= 1) {
     const piece = pieces[index] as PullPiece;
     needed =
       piece.kind === 'straight'
@@ -58,4 +61,17 @@ export function pullChain(
     return tension;
   });
   return { feed, holdBack, tensions };
+}
+
+/** The last piece on which the cable can run by its own weight; behind it nothing asks to be held. −1: none. */
+function lastFall(pieces: readonly PullPiece[]): number {
+  for (let index = pieces.length - 1; index >= 0; index -= 1) {
+    const piece = pieces[index] as PullPiece;
+    const isLevel =
+      piece.kind === 'straight'
+        ? piece.way.rise >= 0
+        : piece.way.headingUp === 0 && piece.way.normalUp === 0;
+    if (!isLevel) return index;
+  }
+  return -1;
 }

@@ -23,7 +23,10 @@ const LEVELS = ['low', 'likely', 'high'] as const;
 const INCHES = 12;
 /** The largest friction anybody reckons with. */
 export const MOST_FRICTION = 1.2;
-const BISECTIONS = 16;
+const MOST_STEPS = 60;
+const CLOSE = 1e-4;
+/** Stands for no tension at all where a logarithm is asked, lbf. */
+const TINY = 1e-9;
 
 const band = (of: (level: (typeof LEVELS)[number]) => number): Band => ({
   low: of('low'),
@@ -40,18 +43,36 @@ function sidewallOf(piece: PullPiece, set: PullSet, entering: number, leaving: n
 
 function walk({ pieces, sets, feed }: DirectionInput, friction: number) {
   const chain = pullChain(pieces, sets, friction, feed);
+  const { tensions } = chain;
+  let entering = chain.feed;
   const sidewalls = pieces.map((piece, index) => {
-    const entering = index === 0 ? chain.feed : (chain.tensions[index - 1] ?? 0);
+    const leaving = tensions[index] as number;
     const set = sets[piece.section];
-    return set ? sidewallOf(piece, set, entering, chain.tensions[index] ?? 0) : 0;
+    const sidewall = set ? sidewallOf(piece, set, entering, leaving) : 0;
+    entering = leaving;
+    return sidewall;
   });
-  return { ...chain, sidewalls };
+  return { feed: chain.feed, holdBack: chain.holdBack, tensions, sidewalls };
 }
 
 /** The peaks of a direction at any friction. */
 export function peaksAt(input: DirectionInput, friction: number): Peaks {
-  const { feed, tensions, sidewalls } = walk(input, friction);
-  return { tension: Math.max(feed, ...tensions), sidewall: Math.max(0, ...sidewalls) };
+  const { pieces, sets } = input;
+  const { feed, tensions } = pullChain(pieces, sets, friction, input.feed);
+  let tension = feed;
+  let sidewall = 0;
+  let entering = feed;
+  for (let index = 0; index < pieces.length; index += 1) {
+    const piece = pieces[index] as PullPiece;
+    const leaving = tensions[index] as number;
+    const set = sets[piece.section];
+    if (leaving > tension) tension = leaving;
+    if (set && piece.kind === 'bend') {
+      sidewall = Math.max(sidewall, sidewallOf(piece, set, entering, leaving));
+    }
+    entering = leaving;
+  }
+  return { tension, sidewall };
 }
 
 export interface DirectionFigures {
@@ -135,20 +156,32 @@ export function governingLimit(
   });
   const [worst] = candidates.sort((a, b) => b.ratio - a.ratio);
   if (!worst) return null;
-  const reachedAt = frictionWhere(
-    (mu) => valueFor(worst.limit, peaksAt(input, mu)) > worst.allowed,
-  );
+  const reachedAt = frictionWhere((mu) => valueFor(worst.limit, peaksAt(input, mu)), worst.allowed);
   return { ...worst, reachedAt };
 }
 
-/** The friction from which something is so, to 0.0001, where it is not so at 0 and is by 1.2; else null. */
-export function frictionWhere(isSo: (friction: number) => boolean): number | null {
+/**
+ * The friction at which a peak that grows with friction passes what is allowed, to 0.0001 of that peak, where it does not at 0 and does by
+ * 1.2; else null. Peaks grow by powers of e, so their logarithms are interpolated (regula falsi after Anderson and Björck, 1973).
+ */
+export function frictionWhere(peak: (friction: number) => number, allowed: number): number | null {
+  const over = (friction: number) => Math.log(Math.max(peak(friction), TINY) / allowed);
   let [low, high] = [0, MOST_FRICTION];
-  if (isSo(low) || !isSo(high)) return null;
-  for (let step = 0; step < BISECTIONS; step += 1) {
-    const middle = (low + high) / 2;
-    if (isSo(middle)) high = middle;
-    else low = middle;
+  let [below, above] = [over(low), over(high)];
+  if (below > 0 || above <= 0) return null;
+  for (let step = 0; step < MOST_STEPS && high - low > CLOSE; step += 1) {
+    const friction = (low * above - high * below) / (above - below);
+    const found = over(friction);
+    if (Math.abs(found) < CLOSE) return friction;
+    if (found > 0) {
+      const slowed = 1 - found / above;
+      [high, above] = [friction, found];
+      below *= slowed > 0 ? slowed : 1 / 2;
+    } else {
+      const slowed = 1 - found / below;
+      [low, below] = [friction, found];
+      above *= slowed > 0 ? slowed : 1 / 2;
+    }
   }
   return high;
 }

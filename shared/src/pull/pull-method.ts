@@ -6,6 +6,8 @@ import type { Band } from '../contracts/run-analysis';
 
 /** Pulled with one hand, lbf: judgement from published push and pull strengths. */
 export const EASY = 25;
+/** Past a flip by this much the harder method shows. */
+const JUST_PAST = 1e-4;
 
 const HARDER: readonly PullMethod[] = ['easy', 'one', 'two', 'puller', 'not-as-drawn'];
 
@@ -35,13 +37,24 @@ export function pullMethod(
   friction: Band,
   limits: PullLimits,
 ): MethodAnswer {
-  const at = (mu: number) => methodFor(peaksAt(input, mu), limits);
-  const likely = at(friction.likely);
-  const flipsAt = frictionWhere((mu) => isHarder(at(mu), likely));
+  const peaks = peaksAt(input, friction.likely);
+  const likely = methodFor(peaks, limits);
+  const high = methodFor(peaksAt(input, friction.high), limits);
+  if (likely === 'not-as-drawn') return { likely, high, flipsAt: null, flipsTo: null };
+  const { conductor, attachment, puller, rope, handOne, handTwo, sidewall } = limits;
+  const most = Math.min(conductor, attachment, puller ?? Infinity, rope ?? Infinity);
+  const next = Math.min(
+    ...[EASY, handOne, handTwo, most].filter((bound) => bound >= peaks.tension),
+  );
+  const flips = [
+    frictionWhere((mu) => peaksAt(input, mu).tension, next),
+    frictionWhere((mu) => peaksAt(input, mu).sidewall, sidewall.stop),
+  ].filter((flip): flip is number => flip !== null);
+  const flipsAt = flips.length === 0 ? null : Math.min(...flips);
   return {
     likely,
-    high: at(friction.high),
+    high,
     flipsAt,
-    flipsTo: flipsAt === null ? null : at(flipsAt),
+    flipsTo: flipsAt === null ? null : methodFor(peaksAt(input, flipsAt + JUST_PAST), limits),
   };
 }

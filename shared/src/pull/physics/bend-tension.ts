@@ -30,7 +30,12 @@ export function bendTension(tension: number, way: BendWay, load: Load): number {
   const turn = Math.min(friction * angle, MOST_TURN);
   if (heft === 0) return tension * Math.exp(turn);
   if (isLevel(way)) {
-    return tension * Math.cosh(turn) + Math.hypot(tension, heft) * Math.sinh(turn);
+    // cosh and sinh of one exponential: this line is most of the work of a run.
+    const grown = Math.expm1(turn);
+    const shrunk = grown / (1 + grown);
+    const cosh = 1 + (grown - shrunk) / 2;
+    const sinh = (grown + shrunk) / 2;
+    return tension * cosh + Math.sqrt(tension * tension + heft * heft) * sinh;
   }
   // Falling at most W·R for each radian, a tension this high stays above the weight's part all along.
   if (sidewaysUp(way) < FLAT && tension >= heft * (1 + angle)) {
