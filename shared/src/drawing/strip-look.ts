@@ -21,6 +21,10 @@ export interface StripLook {
   /** Height of the tick of a 90 over the upper wall. */
   tick: number;
   spacing: Spacing;
+  /** The row of pulls with its words, the row of the limit over the tension, and the tension itself. */
+  pulls: number;
+  tensionNote: number;
+  tension: number;
   labelRows: 0 | 1 | 2;
   labelRow: number;
   names: number;
@@ -45,6 +49,9 @@ const DESK: StripLook = {
   bore: 9,
   tick: 24,
   spacing: { inside: 6, between: 13, beside: 4 },
+  pulls: 34,
+  tensionNote: 16,
+  tension: 64,
   labelRows: 2,
   labelRow: 16,
   names: 22,
@@ -67,6 +74,9 @@ const PHONE: StripLook = {
   bore: 10,
   tick: 22,
   spacing: { inside: 7, between: 14, beside: 5 },
+  pulls: 36,
+  tensionNote: 18,
+  tension: 40,
   labelRows: 1,
   labelRow: 18,
   names: 22,
@@ -81,6 +91,9 @@ const PHONE: StripLook = {
 /** For a screen held sideways: the run and its degrees. */
 const COMPACT_HEIGHT: StripLook = {
   ...PHONE,
+  pulls: 0,
+  tensionNote: 0,
+  tension: 0,
   labelRows: 0,
   tick: 10,
   halfBox: 9,

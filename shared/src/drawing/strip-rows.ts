@@ -2,6 +2,10 @@ import type { StripLook } from './strip-look';
 
 /** Where the rows and lanes of a strip stand, px from its top: baselines of texts, tops of lanes. */
 export interface StripRows {
+  pullsText: number;
+  pullsBar: number;
+  tensionNote: number;
+  tension: number;
   /** Baseline of the lower row of bend labels. */
   labels: number;
   /** The middle of the conduit. */
@@ -20,8 +24,14 @@ const AIR = 6;
 /** Between the lane of height and the degrees: their lines should not be read as one lane. */
 const LANE_AIR = 10;
 
-export function stripRows(look: StripLook, hasHeight: boolean, hasLengths: boolean): StripRows {
-  const labels = look.labelRows * look.labelRow;
+export function stripRows(
+  look: StripLook,
+  has: { pulls: boolean; height: boolean; lengths: boolean },
+): StripRows {
+  const hasHeight = has.height;
+  const tension = look.pulls + look.tensionNote;
+  const underPulls = has.pulls ? tension + look.tension + LANE_AIR : 0;
+  const labels = underPulls + look.labelRows * look.labelRow;
   const run = labels + 4 + look.tick + look.bore / 2;
   const underRun = run + Math.max(look.halfBox, look.bore / 2 + 3);
   const names = underRun + look.names - 7;
@@ -33,8 +43,12 @@ export function stripRows(look: StripLook, hasHeight: boolean, hasLengths: boole
     underHeight + look.limitRow + (look.limitRow > 0 ? 2 : hasHeight ? LANE_AIR : AIR);
   const underDegrees = degrees + look.degrees;
   const axis = underDegrees + look.totals;
-  const axisRoom = hasLengths ? look.axis : 0;
+  const axisRoom = has.lengths ? look.axis : 0;
   return {
+    pullsText: look.text + 2,
+    pullsBar: look.pulls - 8,
+    tensionNote: tension - 4,
+    tension,
     labels: labels - 4,
     run,
     names,

@@ -1,6 +1,7 @@
 import type { RunAnalysis } from '../contracts/run-analysis';
 import type { ExpandedRun } from '../run/expanded-run';
 import { formatAngle } from '../units/format-angle';
+import { formatLimit } from '../units/format-force';
 import { axisLabel, axisTicks } from './axis';
 import { placeBendLabels } from './bend-labels';
 import type { DisplayList, Mark, TextMark } from './display-list';
@@ -10,8 +11,11 @@ import { drawHeightLane, heightsOf } from './lanes/height-lane';
 import { drawNamesRow } from './lanes/names-row';
 import { drawRunLane } from './lanes/run-lane';
 import { steepStretches } from './lanes/steep-stretches';
+import { drawPullsRow } from './lanes/pulls-row';
+import { drawTensionLane } from './lanes/tension-lane';
 import { drawTotalsRow } from './lanes/totals-row';
 import type { Say } from '../words/create-words';
+import type { WordKey } from '../words/word-key';
 import { bendWishes } from './strip-bends';
 import { wordRaceways, wordScale } from './strip-caption';
 import { drawGutter } from './strip-gutter';
@@ -19,10 +23,11 @@ import { stripLook } from './strip-look';
 import type { StripVariant } from './strip-look';
 import { drawOverview, OVERVIEW_BUTTONS } from './strip-overview';
 import { placeRun } from './strip-places';
+import { placePulls } from './strip-pulls';
 import type { Place } from './strip-places';
 import { stripRows } from './strip-rows';
 import { sectionSteps } from './strip-steps';
-import { textWidth } from './text-width';
+import { fitText, textWidth } from './text-width';
 
 export interface StripOptions {
   expanded: ExpandedRun;
@@ -32,6 +37,8 @@ export interface StripOptions {
   variant: StripVariant;
   sun: boolean;
   selectedId: string | null;
+  /** False leaves out the rows of the pulls, where there is no room for them. */
+  hasPulls?: boolean;
   say: Say;
 }
 
@@ -56,9 +63,26 @@ export function drawStrip(options: StripOptions): StripDrawing {
   const look = stripLook(variant, sun);
   const view = Math.max(1, width - look.gutter);
   const places = placeRun(expanded, view, look);
-  const heights = look.height > 0 ? heightsOf(expanded, places) : null;
+  const pulls =
+    options.hasPulls !== false && look.tension > 0 && expanded.length !== null
+      ? placePulls(expanded, analysis.pulls, places)
+      : [];
+  const hasPulls = pulls.some(({ points }) => points.length > 0);
+  // The phone has room for one of the two.
+  const hasRoomForHeight = look.height > 0 && !(hasPulls && look.gutter === 0);
+  const heights = hasRoomForHeight ? heightsOf(expanded, places) : null;
   const isWide = places.width > view + 1;
-  const rows = stripRows(look, heights !== null, expanded.length !== null);
+  const rows = stripRows(look, {
+    pulls: hasPulls,
+    height: heights !== null,
+    lengths: expanded.length !== null,
+  });
+  const tension = drawTensionLane(hasPulls ? pulls : [], {
+    top: rows.tension,
+    height: look.tension,
+    pen: look.pen,
+    hasShade: variant === 'desk' && !sun,
+  });
   const steps = sectionSteps(expanded, analysis, places);
   const steep = steepStretches(expanded, places, look);
   const labels = look.labelRows === 0 ? [] : bendLabels();
@@ -71,14 +95,16 @@ export function drawStrip(options: StripOptions): StripDrawing {
   });
   const limit = steps[0]?.limit ?? 0;
   const limitText = say('strip.limit', { degrees: formatAngle(limit) });
+  const throughIds = new Set(pulls.flatMap(({ through }) => through.map(({ id }) => id)));
   const marks: Mark[] = [
     ...selection(places.elements, selectedId, rows.axis, look.halfBox + 4, sun),
+    ...(hasPulls ? pullMarks() : []),
     ...(heights
       ? drawHeightLane(heights, { top: rows.height, height: look.height, pen: look.pen })
       : []),
     ...(heights && look.gutter === 0 ? [heightLabel(heights.highest - heights.lowest)] : []),
     ...lane.marks,
-    ...drawRunLane(expanded, places, steep, look, rows.run),
+    ...drawRunLane(expanded, places, steep, look, rows.run, throughIds),
     ...labels,
     ...drawNamesRow(expanded, places, steep, look, rows.names, say),
     ...(look.limitRow > 0
@@ -98,7 +124,10 @@ export function drawStrip(options: StripOptions): StripDrawing {
   ];
   const body = { width: places.width, height: rows.bottom, marks };
   return {
-    gutter: look.gutter > 0 ? drawGutter({ look, rows, lane, limit, heights, say }) : null,
+    gutter:
+      look.gutter > 0
+        ? drawGutter({ look, rows, lane, limit, heights, tension: hasPulls ? tension : null, say })
+        : null,
     body,
     overview: isWide ? drawOverview(expanded, places, view - OVERVIEW_BUTTONS) : null,
     places: places.elements,
@@ -106,6 +135,39 @@ export function drawStrip(options: StripOptions): StripDrawing {
     caption: wordScale(expanded, places.scale.stretchedUnder, say),
     raceways: wordRaceways(expanded, say),
   };
+
+  function pullMarks(): Mark[] {
+    const labels = new Map(
+      expanded.elements.map(({ element }) => [
+        element.id,
+        element.kind === 'pull-point' ? element.label : undefined,
+      ]),
+    );
+    const labelOf = (id: string) => labels.get(id) ?? say('strip.kind.pull-point');
+    const rowsOfPulls = { text: rows.pullsText, bar: rows.pullsBar };
+    return [
+      ...drawPullsRow(pulls, places.width, look, rowsOfPulls, { say, labelOf }),
+      ...tension.marks,
+      ...tensionNote(),
+    ];
+  }
+
+  /** The limit over the left end of the lane: always where there is no gutter, else only where it is out of sight. */
+  function tensionNote(): TextMark[] {
+    const named = tension.above ?? (look.gutter === 0 ? tension.limit : null);
+    if (!named) return [];
+    const key = tension.above ? 'strip.limitAbove' : 'strip.limitPounds';
+    const words = say(key, {
+      pounds: formatLimit(named.lbf),
+      name: say(`findings.pullLimit.${named.name}` as WordKey),
+    });
+    const room = places.width - places.start - look.edge;
+    const text = fitText(words, room, look.text, look.weight);
+    if (text === null) return [];
+    return [
+      { ...small(places.start, rows.tensionNote, text), weight: look.weight, row: 'tension' },
+    ];
+  }
 
   function small(x: number, y: number, text: string): Omit<TextMark, 'row'> {
     const { text: size } = look;

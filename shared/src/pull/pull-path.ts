@@ -34,6 +34,8 @@ export type PullPiece = StraightPiece | BendPiece;
 export type NoWay = 'no-directions' | 'no-lengths' | 'no-radius';
 
 const INCHES = 12;
+/** A flexible piece planned to turn less than this, rad, is a straight one. */
+const STRAIGHT = 1e-6;
 
 /**
  * The way of a pull through the sections `first` to `last`, from the lower station to the higher. Without any directions
@@ -137,9 +139,10 @@ function arcsOf(pieces: readonly CentreLinePiece[]): ReadonlyMap<string, Arc> {
   );
 }
 
-function bendPiece(bend: PlacedBend, arcs: ReadonlyMap<string, Arc>): BendPiece {
+function bendPiece(bend: PlacedBend, arcs: ReadonlyMap<string, Arc>): PullPiece {
   const { elementId, section, from, to, planned } = bend;
   const angle = radians(bend.angle);
+  if (planned && angle < STRAIGHT) return straightPiece({ elementId, from, to, rise: 0 }, section);
   const bearsOn = planned || bend.radius === 0 ? 'unknown' : 'wall';
   const radius = (planned ? (to - from) / angle : (bend.radius ?? 0)) / INCHES;
   const way: BendWay = { angle, radius, headingUp: 0, normalUp: 0 };

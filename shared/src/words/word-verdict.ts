@@ -42,7 +42,10 @@ const KEY: Record<CheckName, (verdict: Verdict) => VerdictKey> = {
   sidewall: ({ status, values }) => {
     if (values.reason) return 'findings.verdict.sidewall-none';
     if (status === 'over') return 'findings.verdict.sidewall-over';
-    return status === 'watch' ? 'findings.verdict.sidewall-watch' : 'findings.verdict.sidewall-ok';
+    if (status !== 'watch') return 'findings.verdict.sidewall-ok';
+    return Number(values.likely) > Number(values.caution)
+      ? 'findings.verdict.sidewall-watch'
+      : 'findings.verdict.sidewall-dry';
   },
   radius: ({ status }) => {
     if (status === 'over') return 'findings.verdict.radius-over';

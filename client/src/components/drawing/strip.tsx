@@ -15,6 +15,7 @@ interface Props extends RunView {
   variant: StripVariant;
   sun: boolean;
   selectedId: string | null;
+  hasPulls?: boolean;
   onSelect: (elementId: string) => void;
   /** Enter on the selected piece. */
   onEnter: () => void;
@@ -22,8 +23,18 @@ interface Props extends RunView {
 
 /** The run unrolled: one tab stop, in which ← and → walk the pieces, and a list of them for who hears the screen. */
 export function Strip(props: Props) {
-  const { document, analysis, expanded, width, variant, sun, selectedId, onSelect, onEnter } =
-    props;
+  const {
+    document,
+    analysis,
+    expanded,
+    width,
+    variant,
+    sun,
+    selectedId,
+    hasPulls,
+    onSelect,
+    onEnter,
+  } = props;
   const { say } = useWords();
   const id = useId();
   const scroller = useRef<HTMLDivElement>(null);
@@ -31,8 +42,9 @@ export function Strip(props: Props) {
   const selected = pieceAt(document, selectedId);
   const drawnId = selected?.id ?? null;
   const drawing = useMemo(
-    () => drawStrip({ expanded, analysis, width, variant, sun, selectedId: drawnId, say }),
-    [expanded, analysis, width, variant, sun, drawnId, say],
+    () =>
+      drawStrip({ expanded, analysis, width, variant, sun, selectedId: drawnId, hasPulls, say }),
+    [expanded, analysis, width, variant, sun, drawnId, hasPulls, say],
   );
   const view = width - (drawing.gutter?.width ?? 0);
   const scrolled = useScrolled(scroller);

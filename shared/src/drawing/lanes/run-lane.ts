@@ -40,6 +40,7 @@ export function drawRunLane(
   steep: readonly SteepStretch[],
   look: StripLook,
   axis: number,
+  through: ReadonlySet<string>,
 ): Mark[] {
   return [
     ...wallMarks(expanded, places, look, axis),
@@ -48,6 +49,7 @@ export function drawRunLane(
     ...expanded.elements.flatMap(({ element, index }) => {
       const place = places.elements[index];
       if (!place || !isPullPoint(element)) return [];
+      if (through.has(element.id)) return throughMarks(place.from, axis, look);
       return boxMarks(place.from, axis, isAccessible(element), look);
     }),
   ];
@@ -174,6 +176,24 @@ function tickMarks(
       ...(isFirm ? {} : { dash: [4, 3] as [number, number] }),
     });
   });
+}
+
+/** A box the cable is pulled straight through: the line of the conduit runs on in it. */
+function throughMarks(x: number, axis: number, look: StripLook): Mark[] {
+  const half = look.halfBox;
+  const pen = { stroke: 'ink', strokeWidth: look.pen } as const;
+  return [
+    {
+      kind: 'rect',
+      x: x - half,
+      y: axis - half,
+      width: half * 2,
+      height: half * 2,
+      fill: 'surface',
+      ...pen,
+    },
+    line(x - half, axis, x + half, axis, pen),
+  ];
 }
 
 /** A pull point: a square with a plus. One nobody can reach: dashed, without a plus. */

@@ -9,8 +9,8 @@ import classes from './list.module.css';
 import { PieceRowCells } from './piece-row';
 import { SectionLine } from './section-heading';
 
-const COLUMNS = ['number', 'piece', 'toward', 'leg', 'along', 'angle', 'since'] as const;
-const NUMERIC: ReadonlySet<string> = new Set(['leg', 'along', 'angle', 'since']);
+const COLUMNS = ['number', 'piece', 'toward', 'leg', 'along', 'angle', 'since', 'pull'] as const;
+const NUMERIC: ReadonlySet<string> = new Set(['leg', 'along', 'angle', 'since', 'pull']);
 
 /** The run piece by piece, by section. One tab stop; the arrows walk the rows. */
 export function PieceList({ onScroll }: { onScroll?: (event: UIEvent<HTMLDivElement>) => void }) {

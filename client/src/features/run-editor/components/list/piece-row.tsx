@@ -1,5 +1,5 @@
 import { memo } from 'react';
-import { formatAngle, isAccessible } from '@fairlead/shared';
+import { formatAngle, formatForce, isAccessible } from '@fairlead/shared';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
 import { listLength } from '../model/list-length';
@@ -13,7 +13,7 @@ import classes from './list.module.css';
 export const PieceRowCells = memo(function PieceRowCells({ row }: { row: PieceRow }) {
   const { say } = useWords();
   const expanded = useRunEditor((state) => state.expanded);
-  const { piece, number, leg, station, since, isOver } = row;
+  const { piece, number, leg, station, since, isOver, pull } = row;
   const none = <span className={classes.muted}>{say('workbench.list.none')}</span>;
   const toward = towardOf(piece);
   const isPullPoint = piece.kind === 'pull-point';
@@ -39,6 +39,9 @@ export const PieceRowCells = memo(function PieceRowCells({ row }: { row: PieceRo
       <td className={classes.number}>
         {formatAngle(since)}
         {isOver && <span className={classes.overWord}>{say('workbench.list.over')}</span>}
+      </td>
+      <td className={classes.number}>
+        {pull === null ? none : say('workbench.list.pounds', { pounds: formatForce(pull) })}
       </td>
     </>
   );

@@ -25,11 +25,12 @@ export function SectionLine({ section }: { section: SectionAnalysis }) {
       </span>
       <span className={classes.sectionAnswer}>
         {remaining.isOver && <StatusGlyph status="over" size={18} />}
-        <Explained name={degrees} explain={() => explainDegrees(section, edition)}>
-          {degrees}
-        </Explained>
-        {', '}
-        {remaining.words}
+        <span>
+          <Explained name={degrees} explain={() => explainDegrees(section, edition)}>
+            {degrees}
+          </Explained>
+          {`, ${remaining.words}`}
+        </span>
       </span>
     </span>
   );

@@ -1,6 +1,7 @@
 import { analyzeRun, bend, buildRun, expandRun, pullPoint, straight } from '@fairlead/shared';
 import type { RunDocument } from '@fairlead/shared';
 import { describe, expect, it } from 'vitest';
+import { PULL_RUNS } from '../../../../../../shared/test/pull-runs';
 import { IDS, threeNineties } from '../testing/sample-runs';
 import { listRows, pieceOf } from './list-rows';
 
@@ -52,5 +53,27 @@ describe('pieceOf', () => {
     expect(pieceOf(threeNineties(), IDS.offset)?.id).toBe(IDS.offset);
     expect(pieceOf(threeNineties(), 'gone')).toBeNull();
     expect(pieceOf(threeNineties(), null)).toBeNull();
+  });
+});
+
+describe('the typical pull of a row', () => {
+  it('is what the head feels leaving the piece, in the planned direction', () => {
+    const rows = rowsOf(PULL_RUNS.feeder()).flatMap((section) => section.rows);
+    const pulls = new Map(rows.map(({ id, pull }) => [id, Math.round(pull ?? -1)]));
+    // Fed at B: nothing there, and the most at A.
+    expect(pulls.get('b')).toBe(0);
+    expect(pulls.get('a')).toBe(1110);
+    expect(pulls.get('bend3')!).toBeLessThan(pulls.get('bend2')!);
+    expect(pulls.get('bend2')!).toBeLessThan(pulls.get('bend1')!);
+  });
+
+  it('runs on through a box that is pulled straight through', () => {
+    const rows = rowsOf(PULL_RUNS.branchThrough()).flatMap((section) => section.rows);
+    expect(rows.find(({ id }) => id === 'box')?.pull).toBeCloseTo(14, 0);
+  });
+
+  it('is nothing where the pull has no answer', () => {
+    const rows = rowsOf(buildRun()).flatMap((section) => section.rows);
+    expect(rows.every(({ pull }) => pull === null)).toBe(true);
   });
 });

@@ -24,6 +24,8 @@ export interface PieceRow {
   /** Degrees since the pull point, this piece included. */
   since: number;
   isOver: boolean;
+  /** lbf, typical, when the head of the pull leaves the piece; null where the pull has no answer. */
+  pull: number | null;
 }
 
 export interface SectionRows {
@@ -58,6 +60,7 @@ export function listRows(
   analysis: RunAnalysis,
   expanded: ExpandedRun,
 ): SectionRows[] {
+  const pulls = typicalPulls(analysis, expanded);
   const bySection = new Map(analysis.sections.map((section) => [section.id, section]));
   return expanded.sections.flatMap((span, order) => {
     const section = bySection.get(span.id);
@@ -78,10 +81,31 @@ export function listRows(
         station: expanded.length === null ? null : placed.from,
         since: total,
         isOver: total > section.limitDegrees + PAST_LIMIT,
+        pull: pulls.get(element.id) ?? null,
       });
     }
     return [{ section, from: span.from, to: span.to, rows }];
   });
+}
+
+/** The typical pull at each piece, in the planned direction; at a box between two pulls the one that ends there. */
+function typicalPulls({ pulls }: RunAnalysis, { elements }: ExpandedRun): Map<string, number> {
+  const stations = new Map(elements.map(({ element, from }) => [element.id, from]));
+  const typical = new Map<string, number>();
+  for (const pull of pulls) {
+    const { profile, feedAt, pullAt, tension } = pull[pull.planned];
+    for (const point of profile) {
+      if (point.elementId !== feedAt || !typical.has(feedAt)) {
+        typical.set(point.elementId, point.tension.likely);
+      }
+    }
+    if (tension) typical.set(pullAt, tension.likely);
+    for (const id of pull.through) {
+      const at = profile.find(({ station }) => station === stations.get(id));
+      if (at) typical.set(id, at.tension.likely);
+    }
+  }
+  return typical;
 }
 
 /** The pieces in order, as the arrow keys walk them. */

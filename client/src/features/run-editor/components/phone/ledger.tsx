@@ -1,4 +1,4 @@
-import { formatAngle } from '@fairlead/shared';
+import { formatAngle, formatForce } from '@fairlead/shared';
 import { StatusGlyph } from '../../../../components/drawing/status-glyph';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
@@ -16,6 +16,8 @@ export function Ledger() {
   const selectedId = useRunEditor((state) => state.selectedId);
   const section = sectionOf(analysis, expanded, selectedId) ?? analysis.sections.at(-1);
   if (!section) return null;
+  const pull = analysis.pulls.find(({ sectionIds }) => sectionIds.includes(section.id));
+  const typical = pull?.[pull.planned].tension?.likely ?? null;
   const remaining = wordRemaining(section, say);
   return (
     <div className={classes.ledger} role="status">
@@ -27,6 +29,8 @@ export function Ledger() {
         })}
         {', '}
         {remaining.words}
+        {typical !== null &&
+          ` · ${say('workbench.ledger.typical', { pounds: formatForce(typical) })}`}
       </span>
     </div>
   );

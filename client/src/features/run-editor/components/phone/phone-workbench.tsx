@@ -60,7 +60,7 @@ function PhoneFrame({ place, view, onView, onOpen }: Props) {
       <main className={classes.part}>
         {!isTyping && <WorstVerdict onOpen={openToFix} />}
         {(isLayout || isTyping) && (
-          <StripPanel variant={isCompact ? 'compact-height' : 'phone'} isPhone />
+          <StripPanel variant={isCompact ? 'compact-height' : 'phone'} isPhone hasPulls={false} />
         )}
         {hasStepper && !isTyping && <PhoneStepper onOpen={() => onView('piece')} />}
         {isTyping && <Ledger />}
@@ -74,7 +74,12 @@ function PhoneFrame({ place, view, onView, onOpen }: Props) {
           <PanelBoundary>
             {isLayout && <PhoneMiddle view={view} onView={onView} />}
             {place === 'conductors' && <ConductorsTab />}
-            {place === 'pull' && <PullTab />}
+            {place === 'pull' && (
+              <>
+                <StripPanel variant="phone" isPhone />
+                <PullTab />
+              </>
+            )}
           </PanelBoundary>
         </div>
         {isTyping && <div className={classes.body} />}

@@ -15,10 +15,11 @@ export type StripVariant = 'desk' | 'phone' | 'compact-height';
 interface Props {
   variant: StripVariant;
   isPhone?: boolean;
+  hasPulls?: boolean;
 }
 
 /** The run unrolled. One tab stop: the arrows walk the pieces, Enter goes to the fields of the one they stand on. */
-export function StripPanel({ variant, isPhone = false }: Props) {
+export function StripPanel({ variant, isPhone = false, hasPulls = true }: Props) {
   const { say } = useWords();
   const { ref, width } = useWidth();
   const document = useRunEditor((state) => state.document);
@@ -33,14 +34,22 @@ export function StripPanel({ variant, isPhone = false }: Props) {
         {isEmptyRun(document) ? (
           <GhostStrip variant={variant} />
         ) : (
-          width > 0 && <DrawnStrip variant={variant} width={width} />
+          width > 0 && <DrawnStrip variant={variant} width={width} hasPulls={hasPulls} />
         )}
       </PanelBoundary>
     </section>
   );
 }
 
-function DrawnStrip({ variant, width }: { variant: StripVariant; width: number }) {
+function DrawnStrip({
+  variant,
+  width,
+  hasPulls,
+}: {
+  variant: StripVariant;
+  width: number;
+  hasPulls: boolean;
+}) {
   const document = useRunEditor((state) => state.document);
   const analysis = useRunEditor((state) => state.analysis);
   const expanded = useRunEditor((state) => state.expanded);
@@ -57,6 +66,7 @@ function DrawnStrip({ variant, width }: { variant: StripVariant; width: number }
       variant={variant}
       sun={sun}
       selectedId={selected?.id ?? null}
+      hasPulls={hasPulls}
       onSelect={select}
       onEnter={editSelected}
     />

@@ -24,7 +24,7 @@ export function WorstVerdict({ onOpen }: { onOpen: () => void }) {
         {worst.status !== 'ok' && (
           <>
             {'. '}
-            {say(`workbench.verdict.check.${worst.check}`)} {wordVerdict(worst, wording)}
+            {`${say(`workbench.verdict.check.${worst.check}`)}: ${wordVerdict(worst, wording)}`}
           </>
         )}
       </span>
