@@ -30,6 +30,36 @@ const COMPLEX = 1.4;
 const MOST_CORRECTION = 10;
 
 /**
+ * What the wall bears of a set by how it lies, as a multiple of its weight, r = d/(D − d): by frictionless statics of
+ * cylinders in a cylinder; 1.4 by convention for what cannot be derived.
+ *
+ * @example WEIGHT_CORRECTION.cradled(0.3943) // 1.2073
+ */
+export const WEIGHT_CORRECTION: Record<Configuration, (r: number) => number> = {
+  single: () => 1,
+  two: (r) => 1 / Math.sqrt(1 - r * r),
+  triangular: (r) => 1 / Math.sqrt(1 - r * r),
+  cradled: (r) => 1 + (4 / 3) * r * r,
+  diamond: (r) => 1 + 2 * r * r,
+  complex: () => COMPLEX,
+};
+
+/**
+ * The part of tension over radius that presses on the worst conductor, by weight correction w. Of four, the bottom one bears
+ * w − 1 and each at the side a half.
+ *
+ * @example SIDEWALL_SHARE.cradled(1.2073) // 0.5406
+ */
+export const SIDEWALL_SHARE: Record<Configuration, (w: number) => number> = {
+  single: () => 1,
+  two: (w) => w / 2,
+  triangular: (w) => w / 2,
+  cradled: (w) => (3 * w - 2) / 3,
+  diamond: (w) => Math.max(w - 1, 1 / 2),
+  complex: (w) => w / 2,
+};
+
+/**
  * Configuration and weight correction of a set in a bore, both in inches, with r = d/(D − d) of the largest:
  * one 1 · two 1/√(1 − r²) · three in a triangle 1/√(1 − r²), in a cradle 1 + 4r²/3 · four max(1.4, 1 + 2r²) · else 1.4.
  *
@@ -49,50 +79,31 @@ export function bundleOf(set: readonly SetOfDiameter[], bore: number): Bundle {
   const count = equals + countOf(others);
   const ride = others.every(({ diameter }) => diameter <= RIDES_ALONG * d);
 
-  if (count === 1) return bundle('single', 1, 1, ratio > 1);
+  if (count === 1) return bundle('single', r, ratio > 1);
   if (count === 2) {
     const both = sizes.reduce((sum, each) => sum + each.count * each.diameter, 0);
     // Two unlike ones may fit where the formula, made for two of the larger, has no answer.
-    if (equals === 1 && ratio <= LEAST_RATIO.two) return complex(both < bore);
-    const w = Math.min(MOST_CORRECTION, 1 / Math.sqrt(1 - r * r));
-    return bundle('two', w, w / 2, ratio > LEAST_RATIO.two);
+    if (equals === 1 && ratio <= LEAST_RATIO.two) return bundle('complex', r, both < bore);
+    return bundle('two', r, ratio > LEAST_RATIO.two);
   }
   if (equals === 3 && ride) {
-    const fits = ratio >= LEAST_RATIO.three;
-    if (ratio < CRADLED_FROM) {
-      const w = 1 / Math.sqrt(1 - r * r);
-      return bundle('triangular', w, w / 2, fits);
-    }
-    return cradled(r, fits);
+    const lies = ratio < CRADLED_FROM ? 'triangular' : 'cradled';
+    return bundle(lies, r, ratio >= LEAST_RATIO.three);
   }
   // A cradle of unlike ones needs room beside the largest.
-  if (count === 3 && ratio > LEAST_RATIO.two) return cradled(r, true);
-  if (equals === 4 && count === 4) {
-    const w = Math.max(COMPLEX, 1 + 2 * r * r);
-    return bundle('diamond', w, Math.max(w - 1, 1 / 2), ratio >= LEAST_RATIO.four);
-  }
-  return complex(ratio > 1);
-}
-
-function cradled(r: number, fits: boolean): Bundle {
-  const w = 1 + (4 / 3) * r * r;
-  return bundle('cradled', w, (3 * w - 2) / 3, fits);
-}
-
-function complex(fits: boolean): Bundle {
-  return bundle('complex', COMPLEX, COMPLEX / 2, fits);
+  if (count === 3 && ratio > LEAST_RATIO.two) return bundle('cradled', r, true);
+  if (equals === 4 && count === 4) return bundle('diamond', r, ratio >= LEAST_RATIO.four);
+  return bundle('complex', r, ratio > 1);
 }
 
 /** A set that does not go in has no weight correction: the formulas have no answer there. */
-function bundle(
-  configuration: Configuration,
-  weightCorrection: number,
-  sidewallShare: number,
-  fits: boolean,
-): Bundle {
-  return fits
-    ? { configuration, weightCorrection, sidewallShare, fits }
-    : { configuration, weightCorrection: 1, sidewallShare: 1, fits };
+function bundle(configuration: Configuration, r: number, fits: boolean): Bundle {
+  if (!fits) return { configuration, weightCorrection: 1, sidewallShare: 1, fits };
+  const derived = Math.min(MOST_CORRECTION, WEIGHT_CORRECTION[configuration](r));
+  // Four lie as they like: never less than a set that cannot be derived.
+  const weightCorrection = configuration === 'diamond' ? Math.max(COMPLEX, derived) : derived;
+  const sidewallShare = SIDEWALL_SHARE[configuration](weightCorrection);
+  return { configuration, weightCorrection, sidewallShare, fits };
 }
 
 const countOf = (sizes: readonly SetOfDiameter[]): number =>
