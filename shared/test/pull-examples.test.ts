@@ -14,7 +14,7 @@ const capstan = (tension: number, mu: number, degrees: number) =>
     { weight: 0, friction: mu },
   );
 const level = (tension: number, length: number, weight: number, friction: number) =>
-  straightTension(tension, { length, rise: 0 }, { weight, friction });
+  straightTension(tension, { length, rise: 0, run: 1 }, { weight, friction });
 
 /*
  * Published examples that are not about pulling, or that their source does not reproduce itself, and are left out:
@@ -144,7 +144,10 @@ it.each([
   ['straight down', 40, -1, 40],
 ])('inclines: %s', (_name, length, rise, leaving) => {
   const load = { weight: 4, friction: 0.35 * 1.2 };
-  expect(straightTension(200, { length, rise }, load)).toBeCloseTo(leaving, 3);
+  expect(straightTension(200, { length, rise, run: Math.sqrt(1 - rise * rise) }, load)).toBeCloseTo(
+    leaving,
+    3,
+  );
 });
 
 // Frictionless statics of cylinders in a cylinder: what the wall bears over the weight.
@@ -211,7 +214,7 @@ it('nine 12 AWG, mixed set, 5 lb of feed, five legs of 20 ft and four 90s: 192.5
   const tensions: number[] = [];
   let tension = 5;
   for (let turn = 0; turn <= 4; turn += 1) {
-    tension = straightTension(tension, { length: 20, rise: 0 }, load);
+    tension = straightTension(tension, { length: 20, rise: 0, run: 1 }, load);
     tensions.push(tension);
     if (turn < 4) tensions.push((tension = capstan(tension, load.friction, 90)));
   }

@@ -140,8 +140,8 @@ function workedPiece(
   const f = plain(friction * (set?.weightCorrection ?? 1));
   const [from, to] = [plain(entering, 2), plain(leaving, 2)];
   if (piece.kind === 'straight') {
-    const { length, rise } = piece.way;
-    const cos = plain(Math.sqrt(Math.max(0, 1 - rise * rise)));
+    const { length, rise, run } = piece.way;
+    const cos = plain(run);
     return `${from} + ${plain(weight)} × ${plain(length, 2)} × (${plain(rise)} + ${f} × ${cos}) = ${to}`;
   }
   const { angle, radius } = piece.way;

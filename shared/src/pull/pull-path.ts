@@ -73,8 +73,8 @@ export function reversePath(pieces: readonly PullPiece[]): PullPiece[] {
 function turnedRound(piece: PullPiece): PullPiece {
   const { elementId, section, from, to } = piece;
   if (piece.kind === 'straight') {
-    const { length, rise } = piece.way;
-    const way = { length, rise: -rise };
+    const { length, rise, run } = piece.way;
+    const way = { length, rise: -rise, run };
     return { kind: 'straight', elementId, section, from: to, to: from, way };
   }
   const { angle, radius, headingUp, normalUp } = piece.way;
@@ -94,12 +94,13 @@ interface Line {
   elementId: string;
   from: number;
   to: number;
-  /** Sine of the slope. */
+  /** Sine and cosine of the slope. */
   rise: number;
+  run: number;
 }
 
-function straightPiece({ elementId, from, to, rise }: Line, section: number): StraightPiece {
-  const way = { length: (to - from) / INCHES, rise };
+function straightPiece({ elementId, from, to, rise, run }: Line, section: number): StraightPiece {
+  const way = { length: (to - from) / INCHES, rise, run };
   return { kind: 'straight', elementId, section, from, to, way };
 }
 
@@ -107,7 +108,8 @@ function linesOf(pieces: readonly CentreLinePiece[]): Line[] {
   return pieces.flatMap((piece): Line[] => {
     if (piece.kind !== 'line' || piece.to <= piece.from) return [];
     const { elementId, from, to, start, end } = piece;
-    return [{ elementId, from, to, rise: unit(subtract(end, start)).z }];
+    const along = unit(subtract(end, start));
+    return [{ elementId, from, to, rise: along.z, run: Math.hypot(along.x, along.y) }];
   });
 }
 
@@ -116,13 +118,13 @@ function levelLines({ elements }: ExpandedRun, bends: readonly PlacedBend[]): Li
   const lines: Line[] = [];
   for (const { element, from, to } of elements) {
     if (element.kind === 'straight' && to > from) {
-      lines.push({ elementId: element.id, from, to, rise: 0 });
+      lines.push({ elementId: element.id, from, to, rise: 0, run: 1 });
     }
   }
   bends.forEach(({ elementId, to }, index) => {
     const next = bends[index + 1];
     if (next?.elementId === elementId && next.from > to) {
-      lines.push({ elementId, from: to, to: next.from, rise: 0 });
+      lines.push({ elementId, from: to, to: next.from, rise: 0, run: 1 });
     }
   });
   return lines.sort((a, b) => a.from - b.from);
@@ -142,7 +144,8 @@ function arcsOf(pieces: readonly CentreLinePiece[]): ReadonlyMap<string, Arc> {
 function bendPiece(bend: PlacedBend, arcs: ReadonlyMap<string, Arc>): PullPiece {
   const { elementId, section, from, to, planned } = bend;
   const angle = radians(bend.angle);
-  if (planned && angle < STRAIGHT) return straightPiece({ elementId, from, to, rise: 0 }, section);
+  if (planned && angle < STRAIGHT)
+    return straightPiece({ elementId, from, to, rise: 0, run: 1 }, section);
   const bearsOn = planned || bend.radius === 0 ? 'unknown' : 'wall';
   const radius = (planned ? (to - from) / angle : (bend.radius ?? 0)) / INCHES;
   const way: BendWay = { angle, radius, headingUp: 0, normalUp: 0 };

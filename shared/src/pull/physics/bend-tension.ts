@@ -3,9 +3,7 @@ import { solveSlope } from './solve-slope';
 
 /** Below this a bend lies in a level or an upright plane. */
 const FLAT = 1e-12;
-const TOLERANCE = 1e-10;
-/** Share of the bend in one step where the tension is held at 0: finds the place the cable goes slack closely enough. */
-const SLACK_STEP = 1 / 256;
+const TOLERANCE = 1e-13;
 /** e to this is past every tension told apart, and still a number. */
 const MOST_TURN = 200;
 /** Past this nobody asks how much more, lbf. */
@@ -66,13 +64,15 @@ export function bendFeed(tension: number, way: BendWay, load: Load): number {
     if (heft * sinh >= tension) return 0;
     return tension * Math.cosh(friction * angle) - Math.hypot(tension, heft) * sinh;
   }
-  if (tension === 0 && neverRunsAway(way, friction)) return 0;
   const slope = slopeOf(way, heft, friction);
-  return solveSlope((back, held) => -slope(angle - back, held), tension, angle, {
-    tolerance: TOLERANCE * (heft + tension),
-    floor: 0,
-    longestStep: SLACK_STEP,
-  });
+  const backOver = (from: number, to: number, leaving: number): number =>
+    solveSlope((turned, held) => -slope(from - turned, held), leaving, from - to, {
+      tolerance: TOLERANCE * (heft + leaving),
+    });
+  // Beyond the steep part a cable held by nothing stays where it is; on it and before it what is needed may grow.
+  const steep = endOfSteepPart(way, friction);
+  const held = steep < angle ? Math.max(0, backOver(angle, steep, tension)) : tension;
+  return steep > 0 ? Math.max(0, backOver(steep, 0, held)) : held;
 }
 
 function slopeOf(way: BendWay, heft: number, friction: number) {
@@ -96,13 +96,20 @@ function sidewaysUp({ headingUp, normalUp }: BendWay): number {
   return square < FLAT ? 0 : Math.sqrt(square);
 }
 
-/** True where the bend is nowhere steeper downward than friction alone holds: tan α ≥ −f all along. */
-function neverRunsAway({ angle, headingUp, normalUp }: BendWay, friction: number): boolean {
-  const end = headingUp * Math.cos(angle) + normalUp * Math.sin(angle);
-  const steepest = -Math.hypot(headingUp, normalUp);
-  // The heading is steepest downward where it points away from its highest, half a turn on.
-  const at = Math.atan2(-normalUp, -headingUp);
-  const passes = at >= 0 && at <= angle;
-  const lowest = Math.min(headingUp, end, passes ? steepest : 1);
-  return lowest >= -friction / Math.sqrt(1 + friction * friction);
+/**
+ * Where in the bend, rad, the cable last runs by its own weight: the heading falls more steeply than friction holds,
+ * tan α < −f. 0: nowhere.
+ */
+function endOfSteepPart({ angle, headingUp, normalUp }: BendWay, friction: number): number {
+  const steepest = Math.hypot(headingUp, normalUp);
+  const holds = friction / Math.sqrt(1 + friction * friction);
+  if (steepest <= holds) return 0;
+  // The heading's height is steepest · cos(ψ − highest): too low between two angles about half a turn from its highest.
+  const highest = Math.atan2(normalUp, headingUp);
+  const half = Math.acos(holds / steepest);
+  for (const turn of [-1, 0, 1]) {
+    const middle = highest + Math.PI + turn * 2 * Math.PI;
+    if (middle - half < angle && middle + half > 0) return Math.min(angle, middle + half);
+  }
+  return 0;
 }

@@ -10,6 +10,8 @@ export interface StraightWay {
   length: number;
   /** Sine of the slope, upward in the direction of the pull. */
   rise: number;
+  /** Its cosine, given apart: near the vertical it is lost in the sine. */
+  run: number;
 }
 
 /** A bend as the cable meets it. */

@@ -1,12 +1,8 @@
 interface Options {
   /** Largest error of one step, in units of y. */
   tolerance: number;
-  /** y is held at this where it would fall below. */
-  floor?: number;
   /** The rest of the way is not walked once y has passed this. */
   enough?: number;
-  /** Longest step as a share of the way; 1 unless a floor wants its place found closely. */
-  longestStep?: number;
 }
 
 const MOST_STEPS = 10_000;
@@ -22,11 +18,11 @@ export function solveSlope(
   slope: (x: number, y: number) => number,
   start: number,
   end: number,
-  { tolerance, floor = -Infinity, enough = Infinity, longestStep = 1 }: Options,
+  { tolerance, enough = Infinity }: Options,
 ): number {
   let x = 0;
   let y = start;
-  let step = end * Math.min(longestStep, 1 / 8);
+  let step = end / 8;
   for (let count = 0; x < end && y < enough && count < MOST_STEPS; count += 1) {
     const h = Math.min(step, end - x);
     const k1 = slope(x, y);
@@ -68,10 +64,10 @@ export function solveSlope(
     const isLast = h <= end * 1e-12;
     if (error <= tolerance || isLast) {
       x += h;
-      y = Math.max(next, floor);
+      y = next;
     }
     const growth = error === 0 ? 4 : SAFETY * (tolerance / error) ** 0.2;
-    step = Math.min(h * Math.min(4, Math.max(0.2, growth)), end * longestStep);
+    step = h * Math.min(4, Math.max(0.2, growth));
   }
   return y;
 }

@@ -6,30 +6,25 @@ import type { Load, StraightWay } from './load';
  *
  * Source: level form TES-P-104.05 (Saudi Electricity Co., 2007) Eq. 05-1; slope form a force balance on an incline.
  *
- * @example straightTension(200, { length: 100, rise: 0.5 }, { weight: 4, friction: 0.42 }) // 545.4923
+ * @example straightTension(200, { length: 100, rise: 0.5, run: 0.866025 }, { weight: 4, friction: 0.42 }) // 545.4923
  */
 export function straightTension(
   tension: number,
-  { length, rise }: StraightWay,
+  { length, rise, run }: StraightWay,
   { weight, friction }: Load,
 ): number {
-  return tension + weight * length * gradient(rise, friction);
+  return tension + weight * length * (rise + friction * run);
 }
 
 /**
  * The least tension entering a straight piece that keeps the cable taut along it and leaves it with `tension`, lbf.
  *
- * @example straightFeed(0, { length: 100, rise: -1 }, { weight: 5.149, friction: 0.42 }) // 514.9
+ * @example straightFeed(0, { length: 100, rise: -1, run: 0 }, { weight: 5.149, friction: 0.42 }) // 514.9
  */
 export function straightFeed(
   tension: number,
-  { length, rise }: StraightWay,
+  { length, rise, run }: StraightWay,
   { weight, friction }: Load,
 ): number {
-  return Math.max(0, tension - weight * length * gradient(rise, friction));
-}
-
-/** What a foot of straight pipe adds, per lb/ft of cable: negative where the cable runs by its own weight. */
-function gradient(rise: number, friction: number): number {
-  return rise + friction * Math.sqrt(Math.max(0, 1 - rise * rise));
+  return Math.max(0, tension - weight * length * (rise + friction * run));
 }
