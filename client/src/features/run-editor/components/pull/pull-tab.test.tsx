@@ -58,6 +58,23 @@ describe('the pull tab', () => {
     expect(document().conditions).toEqual({ limits: { puller: 2000 } });
   });
 
+  it('tries other conditions beside the plan, and keeps them only when told', async () => {
+    const user = userEvent.setup();
+    const { document } = renderPart(PULL_RUNS.branchThrough(), <PullTab />);
+    expect(screen.queryByText(/^Feed at LP-1:/)).toBeNull();
+    await user.type(screen.getByLabelText('With friction'), '0.2');
+    expect(
+      screen.getByText('Feed at LP-1: Easy by hand, 18 lb. Now: Puller, 115 lb.'),
+    ).toBeTruthy();
+    expect(document().conditions).toBeUndefined();
+    await user.click(screen.getByRole('button', { name: 'Use it for this run' }));
+    expect(document().conditions).toEqual({ friction: { low: 0.2, likely: 0.2, high: 0.2 } });
+    expect(screen.queryByText(/^Feed at LP-1:/)).toBeNull();
+    await user.type(screen.getByLabelText('With feed tension'), '5');
+    await user.click(screen.getByRole('button', { name: 'Clear' }));
+    expect(document().conditions).toEqual({ friction: { low: 0.2, likely: 0.2, high: 0.2 } });
+  });
+
   it('refuses frictions out of order and keeps what was typed', async () => {
     const user = userEvent.setup();
     const { document } = renderPart(PULL_RUNS.branch(), <PullTab />);

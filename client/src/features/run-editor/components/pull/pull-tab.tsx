@@ -3,6 +3,7 @@ import { useRunEditor } from '../../state/use-run-editor';
 import { PanelBoundary } from '../panel-boundary';
 import { PullCard } from './pull-card';
 import { PullConditionsCard } from './pull-conditions-card';
+import { WhatIfCard } from './what-if-card';
 import classes from './pull.module.css';
 
 /** How hard each pull is, from both ends, and what that rests on. */
@@ -17,6 +18,9 @@ export function PullTab() {
           <PullCard pull={pull} next={pulls[index + 1] ?? null} />
         </PanelBoundary>
       ))}
+      <PanelBoundary>
+        <WhatIfCard />
+      </PanelBoundary>
       <PanelBoundary>
         <PullConditionsCard />
       </PanelBoundary>
