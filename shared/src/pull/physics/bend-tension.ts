@@ -1,5 +1,6 @@
 import type { BendWay, Load } from './load';
 import { solveSlope } from './solve-slope';
+import { uprightTension } from './upright-bend';
 
 /** Below this a bend lies in a level or an upright plane. */
 const FLAT = 1e-12;
@@ -22,7 +23,7 @@ const ENOUGH = 1e7;
  * @example bendTension(0, { angle: Math.PI / 2, radius: 4, headingUp: 0, normalUp: 0 }, { weight: 5, friction: 0.35 }) // 11.5579
  */
 export function bendTension(tension: number, way: BendWay, load: Load): number {
-  const { angle, headingUp, normalUp } = way;
+  const { angle } = way;
   const { friction } = load;
   const heft = load.weight * way.radius;
   const turn = Math.min(friction * angle, MOST_TURN);
@@ -35,18 +36,7 @@ export function bendTension(tension: number, way: BendWay, load: Load): number {
     const sinh = (grown + shrunk) / 2;
     return tension * cosh + Math.sqrt(tension * tension + heft * heft) * sinh;
   }
-  // Falling at most W·R for each radian, a tension this high stays above the weight's part all along.
-  if (sidewaysUp(way) < FLAT && tension >= heft * (1 + angle)) {
-    const square = 1 + friction * friction;
-    const a = -((1 - friction * friction) * normalUp + 2 * friction * headingUp) / square;
-    const b = headingUp - friction * normalUp + friction * a;
-    return (
-      (tension - heft * a) * Math.exp(turn) + heft * (a * Math.cos(angle) + b * Math.sin(angle))
-    );
-  }
-  const slope = slopeOf(way, heft, friction);
-  const tolerance = TOLERANCE * (heft + tension);
-  return solveSlope(slope, tension, angle, { tolerance, enough: ENOUGH });
+  return solveBend(tension, way, heft, friction);
 }
 
 /**
@@ -64,15 +54,31 @@ export function bendFeed(tension: number, way: BendWay, load: Load): number {
     if (heft * sinh >= tension) return 0;
     return tension * Math.cosh(friction * angle) - Math.hypot(tension, heft) * sinh;
   }
-  const slope = slopeOf(way, heft, friction);
   const backOver = (from: number, to: number, leaving: number): number =>
-    solveSlope((turned, held) => -slope(from - turned, held), leaving, from - to, {
-      tolerance: TOLERANCE * (heft + leaving),
-    });
+    solveBend(leaving, metFrom(way, from, from - to), heft, -friction);
   // Beyond the steep part a cable held by nothing stays where it is; on it and before it what is needed may grow.
   const steep = endOfSteepPart(way, friction);
   const held = steep < angle ? Math.max(0, backOver(angle, steep, tension)) : tension;
   return steep > 0 ? Math.max(0, backOver(steep, 0, held)) : held;
+}
+
+/** Upright bends in closed form, all others by integration; a negative friction walks against the pull. */
+function solveBend(tension: number, way: BendWay, heft: number, friction: number): number {
+  if (sidewaysUp(way) === 0) return uprightTension(tension, way, heft, friction);
+  const tolerance = TOLERANCE * (heft + tension);
+  const slope = slopeOf(way, heft, friction);
+  return solveSlope(slope, tension, way.angle, { tolerance, enough: ENOUGH });
+}
+
+/** The bend met against the pull: from a place in it, over an angle back. */
+function metFrom({ radius, headingUp, normalUp }: BendWay, place: number, angle: number): BendWay {
+  const [cos, sin] = [Math.cos(place), Math.sin(place)];
+  return {
+    angle,
+    radius,
+    headingUp: -(headingUp * cos + normalUp * sin),
+    normalUp: normalUp * cos - headingUp * sin,
+  };
 }
 
 function slopeOf(way: BendWay, heft: number, friction: number) {

@@ -6,6 +6,8 @@ interface Options {
 }
 
 const MOST_STEPS = 10_000;
+/** A long step may pass over a sharp turn of the slope unseen. */
+const LEAST_STEPS = 24;
 const SAFETY = 0.9;
 
 /**
@@ -22,7 +24,8 @@ export function solveSlope(
 ): number {
   let x = 0;
   let y = start;
-  let step = end / 8;
+  const longest = end / LEAST_STEPS;
+  let step = longest;
   for (let count = 0; x < end && y < enough && count < MOST_STEPS; count += 1) {
     const h = Math.min(step, end - x);
     const k1 = slope(x, y);
@@ -67,7 +70,7 @@ export function solveSlope(
       y = next;
     }
     const growth = error === 0 ? 4 : SAFETY * (tolerance / error) ** 0.2;
-    step = h * Math.min(4, Math.max(0.2, growth));
+    step = Math.min(longest, h * Math.min(4, Math.max(0.2, growth)));
   }
   return y;
 }
