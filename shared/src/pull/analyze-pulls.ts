@@ -144,11 +144,25 @@ function unanswered(
   };
 }
 
-const likelyOf = ({ tension }: PullDirection): number => tension?.likely ?? Infinity;
+/** What is compared, in this order: the next figure decides only where the one before is the same from both ends. */
+const COMPARED: readonly ((direction: PullDirection) => number | undefined)[] = [
+  ({ tension }) => tension?.likely,
+  ({ tension }) => tension?.low,
+  ({ tension }) => tension?.high,
+  ({ peakSidewall }) => peakSidewall?.likely,
+  ({ peakSidewall }) => peakSidewall?.high,
+];
+/** Figures closer than this share are the same. */
+const SAME = 1e-8;
 
-/** By tension alone; the first direction where both are equal. */
+/** By tension, then by sidewall; the first direction where everything is equal. */
 function easier(forward: PullDirection, reverse: PullDirection): 'forward' | 'reverse' {
-  return likelyOf(reverse) < likelyOf(forward) * (1 - 1e-9) ? 'reverse' : 'forward';
+  for (const figure of COMPARED) {
+    const [one, other] = [figure(forward) ?? Infinity, figure(reverse) ?? Infinity];
+    if (one === other || Math.abs(one - other) <= SAME * Math.max(one, other)) continue;
+    return other < one ? 'reverse' : 'forward';
+  }
+  return 'forward';
 }
 
 /**

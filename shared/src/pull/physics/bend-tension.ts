@@ -58,7 +58,8 @@ export function bendFeed(tension: number, way: BendWay, load: Load): number {
     solveBend(leaving, metFrom(way, from, from - to), heft, -friction);
   // Beyond the steep part a cable held by nothing stays where it is; on it and before it what is needed may grow.
   const steep = endOfSteepPart(way, friction);
-  const held = steep < angle ? Math.max(0, backOver(angle, steep, tension)) : tension;
+  const isSlack = tension === 0 || steep === angle;
+  const held = isSlack ? tension : Math.max(0, backOver(angle, steep, tension));
   return steep > 0 ? Math.max(0, backOver(steep, 0, held)) : held;
 }
 
