@@ -161,12 +161,17 @@ export function governingLimit(
 }
 
 /**
- * The friction at which a peak that grows with friction passes what is allowed, to 0.0001 of that peak, where it does not at 0 and does by
- * 1.2; else null. Peaks grow by powers of e, so their logarithms are interpolated (regula falsi after Anderson and Björck, 1973).
+ * The friction from `least` up at which a peak passes what is allowed, to 0.0001 of that peak, where it does not at `least` and
+ * does by 1.2; else null. Peaks grow by powers of e, so their logarithms are interpolated (regula falsi after Anderson and
+ * Björck, 1973).
  */
-export function frictionWhere(peak: (friction: number) => number, allowed: number): number | null {
+export function frictionWhere(
+  peak: (friction: number) => number,
+  allowed: number,
+  least = 0,
+): number | null {
   const over = (friction: number) => Math.log(Math.max(peak(friction), TINY) / allowed);
-  let [low, high] = [0, MOST_FRICTION];
+  let [low, high] = [least, MOST_FRICTION];
   let [below, above] = [over(low), over(high)];
   if (below > 0 || above <= 0) return null;
   for (let step = 0; step < MOST_STEPS && high - low > CLOSE; step += 1) {

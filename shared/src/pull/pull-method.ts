@@ -46,9 +46,10 @@ export function pullMethod(
   const next = Math.min(
     ...[EASY, handOne, handTwo, most].filter((bound) => bound >= peaks.tension),
   );
+  // From likely up: where the feed must hold back, less friction may pull harder.
   const flips = [
-    frictionWhere((mu) => peaksAt(input, mu).tension, next),
-    frictionWhere((mu) => peaksAt(input, mu).sidewall, sidewall.stop),
+    frictionWhere((mu) => peaksAt(input, mu).tension, next, friction.likely),
+    frictionWhere((mu) => peaksAt(input, mu).sidewall, sidewall.stop, friction.likely),
   ].filter((flip): flip is number => flip !== null);
   const flipsAt = flips.length === 0 ? null : Math.min(...flips);
   return {
