@@ -1,12 +1,19 @@
 import { checkAccess } from './checks/access';
 import { checkBendFitsLeg } from './checks/bend-fits-leg';
 import { checkContext } from './checks/check-context';
+import type { CheckContext } from './checks/check-context';
 import { checkSection } from './checks/check-section';
 import { checkDirections } from './checks/directions';
 import { checkPull } from './checks/pulls';
 import { checkRadius } from './checks/radius';
 import { makeVerdicts, worstStatus } from './checks/verdicts';
-import type { Assumed, Finding, RunAnalysis, Severity } from './contracts/run-analysis';
+import type {
+  Assumed,
+  Finding,
+  RunAnalysis,
+  SectionAnalysis,
+  Severity,
+} from './contracts/run-analysis';
 import { DEFAULT_SETTINGS } from './contracts/settings';
 import type { CompanySettings } from './contracts/settings';
 import { analyzePulls } from './pull/analyze-pulls';
@@ -32,12 +39,8 @@ export function analyzeRun(
   input: RunDocument,
   settings: CompanySettings = DEFAULT_SETTINGS,
 ): RunAnalysis {
-  const parsed = parseRunDocument(input);
-  if (!parsed.ok) throw new InvalidRunError(parsed.problems);
-  const { document } = parsed;
-  const expanded = expandRun(document, settings);
-  const context = checkContext(document, expanded, settings);
-
+  const context = contextOf(input, settings);
+  const { document, expanded } = context;
   const checked = expanded.sections.map((span) => checkSection(context, span));
   const sections = checked.map(({ section }) => section);
   const pulls = analyzePulls(context);
@@ -73,6 +76,26 @@ export function analyzeRun(
       ...assumedOfPulls(document, settings),
     ],
   };
+}
+
+/**
+ * The sections of a run as `analyzeRun` answers them, without the pulls: for asking many variants of a run at once.
+ *
+ * @throws InvalidRunError with every problem, for anything that is no valid run document
+ */
+export function analyzeSections(
+  input: RunDocument,
+  settings: CompanySettings = DEFAULT_SETTINGS,
+): SectionAnalysis[] {
+  const context = contextOf(input, settings);
+  return context.expanded.sections.map((span) => checkSection(context, span).section);
+}
+
+function contextOf(input: RunDocument, settings: CompanySettings): CheckContext {
+  const parsed = parseRunDocument(input);
+  if (!parsed.ok) throw new InvalidRunError(parsed.problems);
+  const { document } = parsed;
+  return checkContext(document, expandRun(document, settings), settings);
 }
 
 /** Conditions matter once there is something to pull. */

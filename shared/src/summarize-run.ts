@@ -1,5 +1,5 @@
 import type { RunAnalysis, RunSummary, StripSummary } from './contracts/run-analysis';
-import { checkOf, statusOf } from './checks/verdicts';
+import { degreesStatus } from './checks/verdicts';
 import type { ExpandedRun } from './run/expanded-run';
 import { isAccessible, isPullPoint } from './run/pull-points';
 import type { RunDocument } from './run/run-document';
@@ -32,7 +32,6 @@ export function summarizeRun(
 
 /** The strip shows the run and its degrees, so a section carries the status of its degrees alone. */
 function summarizeStrip(analysis: RunAnalysis, expanded: ExpandedRun): StripSummary {
-  const degreeFindings = analysis.findings.filter(({ code }) => checkOf(code) === 'degrees');
   return {
     length: expanded.length,
     pullPoints: expanded.elements.flatMap(({ element, from }) =>
@@ -44,7 +43,7 @@ function summarizeStrip(analysis: RunAnalysis, expanded: ExpandedRun): StripSumm
       to: toStation,
       degrees: analysis.sections[index]?.degrees ?? 0,
       limit: analysis.sections[index]?.limitDegrees ?? 0,
-      status: statusOf(degreeFindings.filter(({ at }) => at.sectionId === id)),
+      status: degreesStatus(analysis, id),
     })),
   };
 }

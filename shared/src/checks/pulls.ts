@@ -20,7 +20,7 @@ export function checkPull(context: CheckContext, checked: CheckedPull): Finding[
 }
 
 const found = (
-  { id, sectionIds }: PullAnalysis,
+  { id, from, to, sectionIds }: PullAnalysis,
   code: Finding['code'],
   severity: Finding['severity'],
   values: Finding['values'],
@@ -29,7 +29,7 @@ const found = (
   code,
   severity,
   at: { pullId: id, sectionId: sectionIds[0], ...(elementId !== undefined && { elementId }) },
-  values,
+  values: { ...values, pullFrom: from, pullTo: to },
   rule: null,
 });
 
@@ -117,7 +117,15 @@ function ends(answer: PullAnalysis): Finding[] {
   if (answer.noneBecause === 'no-reach') return [found(answer, 'pull-no-reach', 'caution', {})];
   const { holdBack, feedAt } = answer[answer.planned];
   if (!holdBack || holdBack.low <= 0) return [];
-  return [found(answer, 'pull-hold-back', 'caution', { holdBack: holdBack.low }, feedAt)];
+  return [
+    found(
+      answer,
+      'pull-hold-back',
+      'caution',
+      { holdBack: holdBack.likely, most: holdBack.low },
+      feedAt,
+    ),
+  ];
 }
 
 /** What the figures rest on that nobody gave: the level, and weights no maker publishes. */

@@ -3,6 +3,7 @@ import type {
   CheckName,
   Finding,
   PullAnalysis,
+  RunAnalysis,
   SectionAnalysis,
   Severity,
   Status,
@@ -65,6 +66,16 @@ export function worstStatus(statuses: readonly Status[]): Status {
 }
 
 /** The status findings give a place: a stop is over, a caution is to watch, a note leaves it OK. */
+/** What the degrees of one section count as. */
+export function degreesStatus(
+  { findings }: Pick<RunAnalysis, 'findings'>,
+  sectionId: string,
+): Status {
+  return statusOf(
+    findings.filter(({ code, at }) => checkOf(code) === 'degrees' && at.sectionId === sectionId),
+  );
+}
+
 export function statusOf(findings: readonly Finding[]): Status {
   return worstStatus(findings.map(({ severity }) => STATUS[severity]));
 }

@@ -27,6 +27,8 @@ export interface StationScale {
   /** Gaps shorter than this are drawn longer; null when all are to scale. Units of station. */
   stretchedUnder: number | null;
   xAt: (station: number) => number;
+  /** The other way: station at px from the first stop. */
+  stationAt: (x: number) => number;
 }
 
 /** Above this share of the width the least gaps leave no room to show distances: the drawing becomes wider. */
@@ -74,16 +76,15 @@ export function stationScale(
   const stretched = gaps.filter(
     ({ distance: own, least: m }) => own >= SHORTEST && m > perUnit * own + UNSEEN,
   );
+  const stations = stops.map(({ station }) => station);
   return {
     width: full,
     perUnit,
     stops: xs,
     stretchedUnder:
       stretched.length === 0 ? null : Math.max(...stretched.map((gap) => gap.distance)),
-    xAt: interpolator(
-      stops.map(({ station }) => station),
-      xs,
-    ),
+    xAt: interpolator(stations, xs),
+    stationAt: interpolator(xs, stations),
   };
 }
 
@@ -105,21 +106,21 @@ function fillWidth(gaps: readonly Gap[], width: number, most: number): number {
   return low;
 }
 
-/** Piecewise linear through the stops; held at both ends. */
-function interpolator(stations: readonly number[], xs: readonly number[]) {
-  return (station: number): number => {
+/** Piecewise linear from what grows along the stops to what grows with it; held at both ends. */
+function interpolator(from: readonly number[], to: readonly number[]) {
+  return (value: number): number => {
     let low = 0;
-    let high = stations.length - 1;
+    let high = from.length - 1;
     while (low < high) {
       const middle = (low + high) >> 1;
-      if ((stations[middle] ?? 0) < station) low = middle + 1;
+      if ((from[middle] ?? 0) < value) low = middle + 1;
       else high = middle;
     }
-    const after = stations[low] ?? 0;
-    const xAfter = xs[low] ?? 0;
-    if (low === 0 || station >= after) return xAfter;
-    const before = stations[low - 1] ?? 0;
-    const xBefore = xs[low - 1] ?? 0;
-    return xBefore + ((station - before) / (after - before)) * (xAfter - xBefore);
+    const after = from[low] ?? 0;
+    const toAfter = to[low] ?? 0;
+    if (low === 0 || value >= after) return toAfter;
+    const before = from[low - 1] ?? 0;
+    const toBefore = to[low - 1] ?? 0;
+    return toBefore + ((value - before) / (after - before)) * (toAfter - toBefore);
   };
 }

@@ -1,5 +1,5 @@
 import { isOver } from '../checks/degree-limit';
-import { checkOf, statusOf } from '../checks/verdicts';
+import { degreesStatus } from '../checks/verdicts';
 import type { RunAnalysis } from '../contracts/run-analysis';
 import type { ExpandedRun } from '../run/expanded-run';
 import { isAccessible, isPullPoint } from '../run/pull-points';
@@ -17,6 +17,8 @@ export interface SketchOptions {
   width: number;
   height: number;
   selectedId: string | null;
+  /** A station to ring instead of the selected piece. */
+  cursor?: number | null;
   /** Labels of 14 px, semi-bold. */
   sun?: boolean;
   say: Say;
@@ -47,6 +49,7 @@ export function drawSketch(options: SketchOptions): DisplayList {
   const taken = boxes.map(({ at }) => around(at, HALF_BOX));
   const names = boxes.map(({ element, at }) => ({ at, text: element.label ?? '' }));
   const selected = expanded.elements.find(({ element }) => element.id === selectedId);
+  const ringed = options.cursor ?? (selected ? (selected.from + selected.to) / 2 : null);
   return {
     width,
     height,
@@ -64,7 +67,7 @@ export function drawSketch(options: SketchOptions): DisplayList {
         strokeWidth: 2,
         ...(isAccessible(element) ? {} : { dash: [3, 2] as [number, number] }),
       })),
-      ...(selected ? [ring(path.pointAt((selected.from + selected.to) / 2))] : []),
+      ...(ringed === null ? [] : [ring(path.pointAt(ringed))]),
       ...placeNames(
         names.filter((name) => name.text !== ''),
         points,
@@ -108,10 +111,9 @@ interface PastSection {
 
 /** Where sections past their limit begin and end, and what that counts as. */
 function pastSections({ expanded, analysis }: SketchOptions): PastSection[] {
-  const findings = analysis.findings.filter(({ code }) => checkOf(code) === 'degrees');
   return expanded.sections.map(({ id, fromStation, toStation }, index) => {
     const { degrees = 0, limitDegrees = 0 } = analysis.sections[index] ?? {};
-    const status = statusOf(findings.filter(({ at }) => at.sectionId === id));
+    const status = degreesStatus(analysis, id);
     const past = pastLimit(isOver(degrees, limitDegrees), status);
     return { from: fromStation, to: toStation, past };
   });

@@ -1,5 +1,5 @@
 import { isOver } from '../checks/degree-limit';
-import { checkOf, statusOf } from '../checks/verdicts';
+import { degreesStatus } from '../checks/verdicts';
 import type { RunAnalysis, Status } from '../contracts/run-analysis';
 import type { ExpandedRun } from '../run/expanded-run';
 import type { DegreeSteps } from './lanes/degrees-lane';
@@ -25,9 +25,8 @@ export function sectionSteps(
     const total = (own[own.length - 1]?.total ?? 0) + angle;
     own.push({ x: places.bends[index] ?? places.start, total, elementId });
   });
-  const findings = analysis.findings.filter(({ code }) => checkOf(code) === 'degrees');
   return expanded.sections.map((span, index) => {
-    const status = statusOf(findings.filter(({ at }) => at.sectionId === span.id));
+    const status = degreesStatus(analysis, span.id);
     const { degrees = 0, limitDegrees: limit = 0 } = analysis.sections[index] ?? {};
     const own = steps[index] ?? [];
     return {

@@ -18,6 +18,8 @@ import type { Say } from '../words/create-words';
 import type { WordKey } from '../words/word-key';
 import { bendWishes } from './strip-bends';
 import { wordRaceways, wordScale } from './strip-caption';
+import { cursorPlace } from './strip-cursor';
+import type { CursorPlace } from './strip-cursor';
 import { drawGutter } from './strip-gutter';
 import { stripLook } from './strip-look';
 import type { StripVariant } from './strip-look';
@@ -51,6 +53,10 @@ export interface StripDrawing {
   /** Where each element stands on the body, in the order of the path. */
   places: Place[];
   sections: { id: string; from: number; to: number }[];
+  /** What a cursor's line crosses, px from the top: from under the words of the pulls to the axis; null without lengths. */
+  lanes: { top: number; axis: number } | null;
+  /** The place of the run under px along the body. */
+  cursorAt: (x: number) => CursorPlace | null;
   /** How true the distances are. */
   caption: string;
   /** Which raceways follow each other; null for a run of one. */
@@ -132,6 +138,11 @@ export function drawStrip(options: StripOptions): StripDrawing {
     overview: isWide ? drawOverview(expanded, places, view - OVERVIEW_BUTTONS) : null,
     places: places.elements,
     sections: steps.map(({ id, fromX, toX }) => ({ id, from: fromX, to: toX })),
+    lanes:
+      expanded.length === null || look.axis === 0
+        ? null
+        : { top: hasPulls ? rows.pullsText + 4 : 0, axis: rows.axis },
+    cursorAt: (x) => cursorPlace(expanded, places, x),
     caption: wordScale(expanded, places.scale.stretchedUnder, say),
     raceways: wordRaceways(expanded, say),
   };

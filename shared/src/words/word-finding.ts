@@ -35,6 +35,7 @@ export function wordFinding(finding: Finding, context: WordingContext): FindingW
   const words = {
     ...shownFigures(values, checkOf(finding.code)),
     place: place === undefined ? '' : labelOf(place),
+    ...pullEnds(finding, labelOf),
     section: at.sectionId === undefined ? '' : labelOf(at.sectionId),
     limitName: limitName(finding, say),
     minimumName: minimumName(finding, say),
@@ -46,6 +47,15 @@ export function wordFinding(finding: Finding, context: WordingContext): FindingW
     body: say(`findings.body.${variant}` as WordKey, words),
     rule: finding.rule ? wordRule(finding.rule, say) : '',
   };
+}
+
+function pullEnds(
+  { values: { pullFrom, pullTo } }: Finding,
+  labelOf: WordingContext['labelOf'],
+): Record<string, string> {
+  return typeof pullFrom === 'string' && typeof pullTo === 'string'
+    ? { from: labelOf(pullFrom), to: labelOf(pullTo) }
+    : {};
 }
 
 export function wordRule({ cite, edition, source }: RuleCitation, say: Say): string {

@@ -1,4 +1,4 @@
-import { elementNumber, formatAngle, formatLength, wordBends } from '@fairlead/shared';
+import { elementNumber, formatAngle, formatForce, formatLength, wordBends } from '@fairlead/shared';
 import type {
   ExpandedRun,
   PathElement,
@@ -64,8 +64,14 @@ export function sinceAt({ analysis, expanded }: RunView, piece: Piece): Since | 
   return { degrees, limit, isOver: degrees > limit + PAST_LIMIT, fromId };
 }
 
-/** Everything the drawing shows of one piece, in words: name, station, total since the pull point, status. */
-export function wordPieceFully(view: RunView, piece: Piece, say: Say): string {
+/** Everything the drawing shows of one piece, in words: name, station, total since the pull point, pull, status. */
+export function wordPieceFully(
+  view: RunView,
+  piece: Piece,
+  /** `typicalPulls` of the run. */
+  pulls: ReadonlyMap<string, number>,
+  say: Say,
+): string {
   const { expanded } = view;
   const placed = expanded.elements.find(({ element }) => element.id === piece.id);
   const since = sinceAt(view, piece);
@@ -80,5 +86,7 @@ export function wordPieceFully(view: RunView, piece: Piece, say: Say): string {
     words.push(say('strip.ofLimit', { degrees: formatAngle(degrees), limit: formatAngle(limit) }));
     if (since.isOver) words.push(say('strip.overLimit'));
   }
+  const pull = pulls.get(piece.id);
+  if (pull !== undefined) words.push(say('strip.typical', { pounds: formatForce(pull) }));
   return words.join(', ');
 }

@@ -11,15 +11,16 @@ interface Props {
   width: number;
   height: number;
   selectedId: string | null;
+  cursor: number | null;
 }
 
 /** The run in space. Decorative for a screen reader: the list says every direction. */
-export function Sketch({ expanded, analysis, width, height, selectedId }: Props) {
+export function Sketch({ expanded, analysis, width, height, selectedId, cursor }: Props) {
   const { say } = useWords();
   const { sun } = useTheme();
   const list = useMemo(
-    () => drawSketch({ expanded, analysis, width, height, selectedId, sun, say }),
-    [expanded, analysis, width, height, selectedId, sun, say],
+    () => drawSketch({ expanded, analysis, width, height, selectedId, cursor, sun, say }),
+    [expanded, analysis, width, height, selectedId, cursor, sun, say],
   );
   return <DisplayListSvg list={list} />;
 }

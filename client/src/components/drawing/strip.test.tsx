@@ -1,5 +1,6 @@
 import { analyzeRun, bend, buildRun, expandRun, pullPoint, straight } from '@fairlead/shared';
-import { render, screen, within } from '@testing-library/react';
+import type { CursorPlace } from '@fairlead/shared';
+import { fireEvent, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
 import { describe, expect, it, vi } from 'vitest';
@@ -21,7 +22,13 @@ const run = buildRun({
 });
 const [first, , secondBend] = run.path.filter(({ kind }) => kind !== 'straight');
 
-function Editor({ selected = null, onEnter }: { selected?: string | null; onEnter: () => void }) {
+interface EditorProps {
+  selected?: string | null;
+  onPoint: (place: CursorPlace | null) => void;
+  onEnter: () => void;
+}
+
+function Editor({ selected = null, onPoint, onEnter }: EditorProps) {
   const [selectedId, select] = useState(selected);
   return (
     <Strip
@@ -33,6 +40,7 @@ function Editor({ selected = null, onEnter }: { selected?: string | null; onEnte
       sun={false}
       selectedId={selectedId}
       onSelect={select}
+      onPoint={onPoint}
       onEnter={onEnter}
     />
   );
@@ -40,10 +48,11 @@ function Editor({ selected = null, onEnter }: { selected?: string | null; onEnte
 
 function setUp(selected: string | null = null) {
   const onEnter = vi.fn();
-  render(<Editor selected={selected} onEnter={onEnter} />);
+  const onPoint = vi.fn<(place: CursorPlace | null) => void>();
+  render(<Editor selected={selected} onPoint={onPoint} onEnter={onEnter} />);
   const list = screen.getByRole('listbox');
   const current = () => within(list).queryByRole('option', { selected: true })?.textContent ?? null;
-  return { user: userEvent.setup(), list, current, onEnter };
+  return { user: userEvent.setup(), list, current, onPoint, onEnter };
 }
 
 describe('Strip', () => {
@@ -56,6 +65,26 @@ describe('Strip', () => {
     expect(spoken[0]).toBe('LP-2, at 0″');
     expect(spoken[1]).toMatch(/^1\. Bend 90°, at \d+′ \d+″, 90° of 360° since the pull point$/);
     expect(spoken[8]).toMatch(/450° of 360° since the pull point, over the limit$/);
+  });
+
+  it('says what the run says under the pointer, and that it has left', () => {
+    const { list, onPoint } = setUp();
+    const drawn = list.querySelector('svg')!;
+    const moveTo = (clientX: number) => {
+      const event = new MouseEvent('pointermove', { clientX, bubbles: true });
+      fireEvent(drawn, Object.assign(event, { pointerType: 'mouse' }));
+    };
+    moveTo(20);
+    expect(onPoint).toHaveBeenLastCalledWith(
+      expect.objectContaining({ elementId: first?.id, station: 0, isOnPiece: true }),
+    );
+    moveTo(25);
+    expect(onPoint).toHaveBeenCalledTimes(1);
+    moveTo(855);
+    expect(list.textContent).toMatch(/53′ 0″ · 450° since JB-1/);
+    fireEvent(drawn.parentElement!, new MouseEvent('pointerout', { bubbles: true }));
+    expect(onPoint).toHaveBeenLastCalledWith(null);
+    expect(list.textContent).not.toContain('since JB-1');
   });
 
   it('is one tab stop', async () => {

@@ -1,12 +1,14 @@
 import { drawStrip, formatLength } from '@fairlead/shared';
-import type { StripVariant } from '@fairlead/shared';
+import type { CursorPlace, StripVariant } from '@fairlead/shared';
 import { useEffect, useId, useMemo, useRef } from 'react';
 import type { KeyboardEvent, MouseEvent } from 'react';
 import { useWords } from '../../hooks/use-words';
 import { DisplayListSvg } from './display-list-svg';
 import classes from './drawing.module.css';
-import { pieceAt, piecesOf, wordPieceFully } from './piece-words';
+import { pieceAt, piecesOf } from './piece-words';
 import type { RunView } from './piece-words';
+import { SpokenPieces } from './spoken-pieces';
+import { StripCursor } from './strip-cursor';
 import { StripOverview } from './strip-overview';
 import { useScrolled } from './use-scrolled';
 
@@ -17,6 +19,8 @@ interface Props extends RunView {
   selectedId: string | null;
   hasPulls?: boolean;
   onSelect: (elementId: string) => void;
+  /** Where the pointer stands, at a desk; null once it has left. */
+  onPoint: (place: CursorPlace | null) => void;
   /** Enter on the selected piece. */
   onEnter: () => void;
 }
@@ -33,6 +37,7 @@ export function Strip(props: Props) {
     selectedId,
     hasPulls,
     onSelect,
+    onPoint,
     onEnter,
   } = props;
   const { say } = useWords();
@@ -115,19 +120,21 @@ export function Strip(props: Props) {
             onClick={pick}
             role="presentation"
           >
-            <DisplayListSvg list={drawing.body} />
+            {variant === 'desk' ? (
+              <StripCursor view={props} drawing={drawing} onPoint={onPoint}>
+                <DisplayListSvg list={drawing.body} />
+              </StripCursor>
+            ) : (
+              <DisplayListSvg list={drawing.body} />
+            )}
           </div>
-          {pieces.map((piece) => (
-            <div
-              key={piece.id}
-              id={`${id}-${piece.id}`}
-              className={classes.spoken}
-              role="option"
-              aria-selected={piece.id === selected?.id}
-            >
-              {wordPieceFully({ document, analysis, expanded }, piece, say)}
-            </div>
-          ))}
+          <SpokenPieces
+            id={id}
+            selectedId={drawnId}
+            document={document}
+            analysis={analysis}
+            expanded={expanded}
+          />
         </div>
       </div>
       {drawing.overview && (

@@ -51,6 +51,7 @@ export function createRunEditor(options: RunEditorOptions): RunEditor {
     canEdit: opened.can.update,
     ...analysedDocument(start.document, settings),
     selectedId: null,
+    cursor: null,
     saving: firstSaving(opened, start, storage.durable),
     conflict: start.conflict ? conflictBetween(start.document, opened, start.base.document) : null,
     drafts: start.drafts,
@@ -58,6 +59,7 @@ export function createRunEditor(options: RunEditorOptions): RunEditor {
     ...labels(),
     run: edit,
     select: (elementId) => store.setState({ selectedId: elementId }),
+    pointAt: (cursor) => store.setState({ cursor }),
     undo: () => step(undoStep(store.getState().document, history)),
     redo: () => step(redoStep(store.getState().document, history)),
     setDraft: (fieldKey, text) => setDrafts({ ...store.getState().drafts, [fieldKey]: text }),
@@ -161,6 +163,7 @@ export function createRunEditor(options: RunEditorOptions): RunEditor {
     changed({
       ...answers,
       selectedId: isThere ? selectedId : null,
+      cursor: null,
       conflict: conflict && conflictBetween(answers.document, conflict.theirs, conflict.base),
     });
     fixes.schedule();

@@ -1,5 +1,6 @@
 import type {
   CommandErrorCode,
+  CursorPlace,
   EditLabel,
   ExpandedRun,
   Finding,
@@ -77,6 +78,7 @@ export interface RunEditorActions {
   /** Carries out the commands as one step; on a refusal nothing has changed. */
   run(commands: readonly RunCommand[], options?: EditOptions): EditResult;
   select(elementId: string | null): void;
+  pointAt(cursor: CursorPlace | null): void;
   undo(): void;
   redo(): void;
   /** Keeps what is being typed in a field, so that a value that can't be read yet survives a reload. */
@@ -103,6 +105,8 @@ export interface RunEditorData {
   findings: Finding[];
   fixesReady: boolean;
   selectedId: string | null;
+  /** Where the pointer stands on the strip; null: nowhere. */
+  cursor: CursorPlace | null;
   saving: Saving;
   conflict: Conflict | null;
   /** What undo would take back; null: nothing. */

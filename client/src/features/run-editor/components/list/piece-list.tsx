@@ -18,6 +18,7 @@ export function PieceList({ onScroll }: { onScroll?: (event: UIEvent<HTMLDivElem
   const sections = useSections();
   const selected = useSelectedPiece();
   const select = useRunEditor((state) => state.select);
+  const pointedId = useRunEditor((state) => state.cursor?.elementId ?? null);
   const { doCommand } = useCommands();
   const body = useRef<HTMLTableElement>(null);
   useScrollToSelected(body, selected?.id ?? null);
@@ -72,6 +73,7 @@ export function PieceList({ onScroll }: { onScroll?: (event: UIEvent<HTMLDivElem
                   key={row.id}
                   className={classes.row}
                   data-piece={row.id}
+                  data-pointed={row.id === pointedId || undefined}
                   tabIndex={row.id === tabStop ? 0 : -1}
                   aria-selected={row.id === selected?.id}
                   onClick={() => select(row.id)}

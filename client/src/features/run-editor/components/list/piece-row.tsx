@@ -1,7 +1,6 @@
-import { memo } from 'react';
+import { memo, useDeferredValue } from 'react';
 import { formatAngle, formatForce, isAccessible } from '@fairlead/shared';
 import { useWords } from '../../../../hooks/use-words';
-import { useRunEditor } from '../../state/use-run-editor';
 import { listLength } from '../model/list-length';
 import type { PieceRow } from '../model/list-rows';
 import { towardOf } from '../model/toward-of';
@@ -9,11 +8,15 @@ import { wordDirection } from '../model/word-direction';
 import { wordAngles, wordPiece } from '../model/word-piece';
 import classes from './list.module.css';
 
+/** An edit changes the figures of many rows: the strip is drawn first, they come right after it. */
+export function PieceRowCells({ row }: { row: PieceRow }) {
+  return <Cells row={useDeferredValue(row)} />;
+}
+
 /** Drawn again only when the run changes, not when another row is selected. */
-export const PieceRowCells = memo(function PieceRowCells({ row }: { row: PieceRow }) {
+const Cells = memo(function Cells({ row }: { row: PieceRow }) {
   const { say } = useWords();
-  const expanded = useRunEditor((state) => state.expanded);
-  const { piece, number, leg, station, since, isOver, pull } = row;
+  const { piece, number, leg, station, angles, since, isOver, pull } = row;
   const none = <span className={classes.muted}>{say('workbench.list.none')}</span>;
   const toward = towardOf(piece);
   const isPullPoint = piece.kind === 'pull-point';
@@ -35,7 +38,7 @@ export const PieceRowCells = memo(function PieceRowCells({ row }: { row: PieceRo
       <td>{toward === undefined ? none : wordDirection(toward, say)}</td>
       <td className={classes.number}>{leg === null ? none : listLength(leg)}</td>
       <td className={classes.number}>{station === null ? none : listLength(station)}</td>
-      <td className={classes.number}>{wordAngles(expanded, row.id, say) ?? none}</td>
+      <td className={classes.number}>{wordAngles(angles, say) ?? none}</td>
       <td className={classes.number}>
         {formatAngle(since)}
         {isOver && <span className={classes.overWord}>{say('workbench.list.over')}</span>}

@@ -1,4 +1,4 @@
-import { analyzeRun, applyCommand } from '@fairlead/shared';
+import { analyzeSections, applyCommand } from '@fairlead/shared';
 import type { CompanySettings, RunCommand, RunDocument, SectionAnalysis } from '@fairlead/shared';
 import type { Piece } from './list-rows';
 
@@ -40,7 +40,7 @@ function sectionHolding(sections: readonly SectionAnalysis[], pieceId: string) {
   return sections.find(({ bends }) => bends.some(({ elementId }) => elementId === pieceId));
 }
 
-/** Each usual angle with the section total it would really give: the change is applied and the run analysed anew. */
+/** Each usual angle with the section total it would really give: the change is applied and the sections analysed anew. */
 export function angleChoices(
   document: RunDocument,
   piece: Piece,
@@ -53,7 +53,7 @@ export function angleChoices(
     const commands: RunCommand[] = [
       { command: 'set-element', args: { elementId: piece.id, patch: { [field]: angle } } },
     ];
-    const { sections } = analyzeRun(commands.reduce(applyCommand, document), settings);
+    const sections = analyzeSections(commands.reduce(applyCommand, document), settings);
     const section =
       sectionHolding(sections, piece.id) ?? sections.find(({ id }) => id === sectionId);
     if (!section) return [];

@@ -1,4 +1,4 @@
-import { elementNumber, legBefore } from '@fairlead/shared';
+import { elementNumber, legBefore, typicalPulls } from '@fairlead/shared';
 import type {
   ExpandedRun,
   PathElement,
@@ -21,6 +21,8 @@ export interface PieceRow {
   leg: number | null;
   /** Where the piece begins, developed inches from the start; null where the run has no lengths. */
   station: number | null;
+  /** Degrees of each of its bends. */
+  angles: readonly number[];
   /** Degrees since the pull point, this piece included. */
   since: number;
   isOver: boolean;
@@ -79,6 +81,7 @@ export function listRows(
         number: elementNumber(document, element.id),
         leg: legBefore(document, element.id).length,
         station: expanded.length === null ? null : placed.from,
+        angles: placed.bends.map((bend) => expanded.bends[bend]?.angle ?? 0),
         since: total,
         isOver: total > section.limitDegrees + PAST_LIMIT,
         pull: pulls.get(element.id) ?? null,
@@ -86,26 +89,6 @@ export function listRows(
     }
     return [{ section, from: span.from, to: span.to, rows }];
   });
-}
-
-/** The typical pull at each piece, in the planned direction; at a box between two pulls the one that ends there. */
-function typicalPulls({ pulls }: RunAnalysis, { elements }: ExpandedRun): Map<string, number> {
-  const stations = new Map(elements.map(({ element, from }) => [element.id, from]));
-  const typical = new Map<string, number>();
-  for (const pull of pulls) {
-    const { profile, feedAt, pullAt, tension } = pull[pull.planned];
-    for (const point of profile) {
-      if (point.elementId !== feedAt || !typical.has(feedAt)) {
-        typical.set(point.elementId, point.tension.likely);
-      }
-    }
-    if (tension) typical.set(pullAt, tension.likely);
-    for (const id of pull.through) {
-      const at = profile.find(({ station }) => station === stations.get(id));
-      if (at) typical.set(id, at.tension.likely);
-    }
-  }
-  return typical;
 }
 
 /** The pieces in order, as the arrow keys walk them. */

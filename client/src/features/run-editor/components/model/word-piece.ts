@@ -1,5 +1,5 @@
 import { elementNumber, formatAngle, formatLength } from '@fairlead/shared';
-import type { ExpandedRun, PathElement, Raceway, RunDocument } from '@fairlead/shared';
+import type { PathElement, Raceway, RunDocument } from '@fairlead/shared';
 import { pieceOf } from './list-rows';
 import type { Say } from '../../../../hooks/use-words';
 
@@ -40,16 +40,15 @@ export function wordPiece(element: PathElement, say: Say): string {
 }
 
 /** The degrees a piece bends, part by part: "90°", "2×45°", "22½°, 45°, 22½°"; null for one that does not bend. */
-export function wordAngles(expanded: ExpandedRun, elementId: string, say: Say): string | null {
-  const parts = expanded.bends.filter((bend) => bend.elementId === elementId);
-  const [first, second] = parts;
-  if (!first) return null;
-  const angle = formatAngle(first.angle);
-  if (parts.length === 3 && second) {
-    return say('workbench.piece.three', { angle, centre: formatAngle(second.angle) });
+export function wordAngles(angles: readonly number[], say: Say): string | null {
+  const [first, second] = angles;
+  if (first === undefined) return null;
+  const angle = formatAngle(first);
+  if (angles.length === 3 && second !== undefined) {
+    return say('workbench.piece.three', { angle, centre: formatAngle(second) });
   }
-  if (parts.length === 2) return say('workbench.piece.twice', { angle });
-  if (parts.length === 4) return say('workbench.piece.four', { angle });
+  if (angles.length === 2) return say('workbench.piece.twice', { angle });
+  if (angles.length === 4) return say('workbench.piece.four', { angle });
   return angle;
 }
 

@@ -1,7 +1,6 @@
 import { formatAngle } from '@fairlead/shared';
 import { useRef } from 'react';
 import { useWords } from '../../../../hooks/use-words';
-import { useRunEditor } from '../../state/use-run-editor';
 import { useSections, useSelectedPiece } from '../hooks/use-piece';
 import { useScrollToSelected } from '../hooks/use-scroll-to-selected';
 import { SectionLine } from '../list/section-heading';
@@ -46,10 +45,8 @@ interface RowProps {
 
 function PhoneRow({ row, isSelected, onOpen }: RowProps) {
   const { say } = useWords();
-  const expanded = useRunEditor((state) => state.expanded);
   const { piece, number, leg, since, isOver } = row;
   const toward = towardOf(piece);
-  const angles = wordAngles(expanded, row.id, say);
   const details = [
     ...(toward === undefined ? [] : [wordDirection(toward, say)]),
     ...(leg === null ? [] : [say('workbench.list.legShort', { leg: listLength(leg) })]),
@@ -73,7 +70,7 @@ function PhoneRow({ row, isSelected, onOpen }: RowProps) {
       </span>
       <span className={classes.rowSince}>
         {formatAngle(since)} {isOver && say('workbench.list.over')}
-        <small>{angles}</small>
+        <small>{wordAngles(row.angles, say)}</small>
       </span>
     </button>
   );

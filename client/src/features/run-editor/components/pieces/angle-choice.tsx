@@ -1,5 +1,5 @@
 import { formatAngle } from '@fairlead/shared';
-import { useMemo, useState } from 'react';
+import { useDeferredValue, useMemo, useState } from 'react';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
 import fieldClasses from '../fields/fields.module.css';
@@ -11,7 +11,8 @@ import type { Piece } from '../model/list-rows';
 /** The usual angles, each with the section total it would give. */
 export function AngleChoiceRow({ piece, sectionId }: { piece: Piece; sectionId: string | null }) {
   const { say } = useWords();
-  const document = useRunEditor((state) => state.document);
+  // Five analyses of the sections: the strip is drawn first.
+  const document = useDeferredValue(useRunEditor((state) => state.document));
   const canEdit = useRunEditor((state) => state.canEdit);
   const settings = useSettings();
   const edit = useEdit();

@@ -52,7 +52,7 @@ export function FeedEnds({ pull }: { pull: PullAnalysis }) {
             <td />
             {WAYS.map((way) => (
               <th key={way} scope="col" data-planned={way === pull.planned || undefined}>
-                {say('workbench.pull.feedAt', { place: labelOf(pull[way].feedAt) })}
+                {say('workbench.pull.feedAt', { place: labelOf(pull[way].feedAt) })}{' '}
                 {way === pull.recommended && (
                   <span className={classes.tag}>{say('workbench.pull.recommended')}</span>
                 )}

@@ -13,6 +13,7 @@ export function SketchPanel({ height = HEIGHT }: { height?: number }) {
   const expanded = useRunEditor((state) => state.expanded);
   const analysis = useRunEditor((state) => state.analysis);
   const selected = useSelectedPiece();
+  const cursor = useRunEditor((state) => state.cursor?.station ?? null);
   const { ref, width } = useWidth();
   const missing = expanded.centreLine
     ? null
@@ -38,6 +39,7 @@ export function SketchPanel({ height = HEIGHT }: { height?: number }) {
             width={width}
             height={height}
             selectedId={selected?.id ?? null}
+            cursor={cursor}
           />
         )}
       </div>

@@ -54,6 +54,7 @@ function DrawnStrip({
   const analysis = useRunEditor((state) => state.analysis);
   const expanded = useRunEditor((state) => state.expanded);
   const select = useRunEditor((state) => state.select);
+  const pointAt = useRunEditor((state) => state.pointAt);
   const selected = useSelectedPiece();
   const { editSelected } = useCommands();
   const { sun } = useTheme();
@@ -68,6 +69,7 @@ function DrawnStrip({
       selectedId={selected?.id ?? null}
       hasPulls={hasPulls}
       onSelect={select}
+      onPoint={pointAt}
       onEnter={editSelected}
     />
   );
