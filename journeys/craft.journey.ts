@@ -2,6 +2,7 @@ import { bend, buildRun, pullPoint, straight, wires } from '@fairlead/shared';
 import type { PathElement, RunDocument } from '@fairlead/shared';
 import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
+import { PULL_RUNS } from '../shared/test/pull-runs';
 import { makeJob, makeRun, makeShop, PASSWORD } from './harness/api';
 import { PHONE, THEMES, useBrowser } from './harness/browser';
 import { signIn } from './harness/sign-in';
@@ -113,5 +114,78 @@ describe('figures out of range', () => {
     expect(verdicts.length).toBeGreaterThan(3);
     for (const verdict of verdicts) expect(verdict).toMatch(/\p{L}.*\S/u);
     expect(await desk.locator('[data-check="fill"]').innerText()).toMatch(/of \d/);
+  });
+});
+
+describe('every computed number opens', () => {
+  /** Opens each figure there is, reads what opens, closes it with Esc; the kinds of explanation seen. */
+  async function openAll(page: Page): Promise<Set<string>> {
+    const figures = page.getByRole('button', { name: /: how it came about$/ });
+    const count = await figures.count();
+    expect(count).toBeGreaterThan(0);
+    const seen = new Set<string>();
+    for (let index = 0; index < count; index += 1) {
+      const figure = figures.nth(index);
+      await figure.click();
+      const panel = page.locator('[data-explanation]');
+      const words = await panel.innerText();
+      expect(words).toMatch(/Exactly .*\d/);
+      expect(words).toMatch(/From\s+\S/);
+      seen.add((await panel.getAttribute('data-explanation')) ?? '');
+      await page.keyboard.press('Escape');
+      await panel.waitFor({ state: 'detached' });
+    }
+    return seen;
+  }
+
+  /** Cells of a table with a figure that does not open. */
+  const closedCells = (page: Page, table: string) =>
+    page
+      .locator(`${table} td`)
+      .evaluateAll((cells) =>
+        cells
+          .filter((cell) => /\d/.test(cell.textContent ?? '') && !cell.querySelector('button'))
+          .map((cell) => cell.textContent),
+      );
+
+  it('of a piece, of the conductors and of a pull', async () => {
+    const shop = await makeShop();
+    const job = await makeJob(shop);
+    const made = await makeRun(shop, job, { ...PULL_RUNS.branchThrough(), tag: 'opens' });
+    const page = await open();
+    await signIn(page, shop.email, PASSWORD);
+    const at = `/jobs/${job.id}/runs/${made.id}`;
+
+    await page.goto(at);
+    await page.locator('tr[data-piece]', { hasText: 'Kick 60' }).click();
+    const piece = page.locator('[data-selected-piece] dl');
+    await piece.waitFor();
+    // The same figures as in the row.
+    const row = await page.locator('tr[aria-selected="true"]').innerText();
+    for (const figure of await piece.locator('dd').allInnerTexts()) expect(row).toContain(figure);
+    expect(await openAll(page)).toEqual(new Set(['station', 'degrees', 'tensionHere']));
+
+    await page.goto(`${at}?tab=conductors`);
+    await page.locator('tr[data-section]').first().waitFor();
+    expect(await openAll(page)).toEqual(new Set(['fill', 'room', 'jam', 'clearance']));
+    const withoutSize = (await closedCells(page, 'table:has([data-section])')).filter(
+      (text) => !/^1\/2 EMT$/.test(text ?? ''),
+    );
+    expect(withoutSize).toEqual([]);
+
+    await page.goto(`${at}?tab=pull`);
+    await page.getByText('Along the pull').click();
+    expect(await openAll(page)).toEqual(
+      new Set([
+        'method',
+        'tension',
+        'tensionHere',
+        'conductor',
+        'sidewall',
+        'weight',
+        'correction',
+        'gauge',
+      ]),
+    );
   });
 });

@@ -12,14 +12,14 @@ const { open } = useBrowser();
 type Name = keyof typeof PULL_RUNS;
 type Way = 'forward' | 'reverse';
 
-/** Opens the figure and reads it exactly: "1866.52 lbf" is 1866.52. */
+/** Opens the figure and reads it exactly: "1866.52 lbf, shown to 50 lb" is 1866.52. */
 async function exactly(page: Page, figure: string): Promise<number> {
   await page.locator(figure).getByRole('button').click();
   const exact = page.getByText(/^Exactly /);
   const words = (await exact.textContent()) ?? '';
   await page.keyboard.press('Escape');
   await exact.waitFor({ state: 'detached' });
-  return Number(/([\d.]+) (lbf|lb\/ft)$/.exec(words)?.[1]);
+  return Number(/([\d.]+) (lbf|lb\/ft)(?:,|$)/.exec(words)?.[1]);
 }
 
 const cell = (way: Way, level: string, pull = 0) =>

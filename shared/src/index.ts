@@ -49,6 +49,8 @@ export * from './run/parse-run-document';
 export * from './explain/explain-limit';
 export * from './explain/explain-pull';
 export * from './explain/explain-section';
+export * from './explain/explain-set';
+export * from './explain/explain-station';
 export * from './explain/explanation';
 export * from './pull/conditions-in-force';
 export * from './pull/plan-pulls';

@@ -25,7 +25,7 @@ export function checkClearance(context: SectionConductors): ClearanceCheck {
   const sized = sizedGroups(context.groups);
   if (!dimensions || sized.length === 0) return { answer: null, findings: [] };
   const { bore, area } = dimensions;
-  const answer = clearanceOf(bore, sized);
+  const answer = clearanceOf(bore, sized)?.clearance ?? null;
   const finding = (code: 'clearance-tight' | 'clearance-negative'): Finding => ({
     code,
     severity: code === 'clearance-tight' ? 'caution' : 'stop',
@@ -57,42 +57,64 @@ function diametersOf(sized: readonly SizedGroup[], most: number): number[] {
     .slice(0, most);
 }
 
+/** How a set lies, by which its clearance is reckoned; `-too-wide`: it does not go in, and lacks so much. */
+export type ClearanceForm =
+  'one' | 'two' | 'two-too-wide' | 'triangular' | 'cradled' | 'three-too-wide' | 'four';
+
+/** The circles round three and round four touching conductors, in their diameters. */
+const ROUND_THREE = 1 + 2 / Math.sqrt(3);
+const ROUND_FOUR = 1 + Math.SQRT2;
+/** Below this D/d three lie as a triangle, above it they cradle. */
+const CRADLED_FROM = 2.5;
+
+const CLEARANCES: Record<ClearanceForm, (bore: number, diameter: number) => number> = {
+  one: (bore, diameter) => bore - diameter,
+  two: clearanceOfTwo,
+  'two-too-wide': (bore, diameter) => bore - 2 * diameter,
+  triangular: triangularClearance,
+  cradled: cradledClearance,
+  'three-too-wide': (bore, diameter) => bore - ROUND_THREE * diameter,
+  four: (bore, diameter) => bore - ROUND_FOUR * diameter,
+};
 /**
  * Clearance, in, of one, two, three or four equal conductors (and of three with small ones beside them); null for any
  * other set.
  */
-function clearanceOf(bore: number, sized: readonly SizedGroup[]): number | null {
+export function clearanceOf(
+  bore: number,
+  sized: readonly SizedGroup[],
+): { form: ClearanceForm; diameter: number; clearance: number } | null {
   const three = threeEqual(sized);
-  if (three !== null) return clearanceOfThree(bore, three);
   const [first, ...rest] = diametersOf(sized, 5);
-  if (first === undefined || rest.some((diameter) => diameter !== first)) return null;
-  switch (rest.length) {
-    case 0:
-      return bore - first;
+  const diameter = three ?? first;
+  if (diameter === undefined) return null;
+  const count = three === null ? 1 + rest.length : 3;
+  // Three that are not alike enough to be reckoned as three have no form.
+  if (three === null && (count === 3 || rest.some((each) => each !== first))) return null;
+  const form = formOf(count, bore / diameter);
+  return form && { form, diameter, clearance: CLEARANCES[form](bore, diameter) };
+}
+
+function formOf(count: number, ratio: number): ClearanceForm | null {
+  switch (count) {
     case 1:
-      return clearanceOfTwo(bore, first);
+      return 'one';
+    case 2:
+      return ratio < 2 ? 'two-too-wide' : 'two';
     case 3:
-      // The circle round four touching conductors is (1 + √2) d across.
-      return bore - (1 + Math.SQRT2) * first;
+      if (ratio < ROUND_THREE) return 'three-too-wide';
+      return ratio < CRADLED_FROM ? 'triangular' : 'cradled';
+    case 4:
+      return 'four';
     default:
       return null;
   }
 }
 
-/** Two side by side in the bottom of the bore: their centres lie (D − d)/2 from its axis and d apart. */
+/** Two side by side in the bottom of the bore: their centres lie (D − d)/2 from its axis and d apart. in. */
 function clearanceOfTwo(bore: number, diameter: number): number {
-  if (bore < 2 * diameter) return bore - 2 * diameter;
   const radius = (bore - diameter) / 2;
   return bore / 2 + Math.sqrt(radius ** 2 - (diameter / 2) ** 2) - diameter / 2;
-}
-
-/** Below a ratio of 2.5 three lie as a triangle, above it they cradle. */
-function clearanceOfThree(bore: number, diameter: number): number {
-  const circumscribed = 1 + 2 / Math.sqrt(3);
-  if (bore < circumscribed * diameter) return bore - circumscribed * diameter;
-  return bore / diameter < 2.5
-    ? triangularClearance(bore, diameter)
-    : cradledClearance(bore, diameter);
 }
 
 /**

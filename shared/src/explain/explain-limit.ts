@@ -1,9 +1,8 @@
 import type { PullAnalysis, StopLimit } from '../contracts/run-analysis';
 import { conductorsInSection } from '../run/conductors-in-section';
-import { bareConductor } from '../tables/bare-conductors';
 import type { ExpandedRun } from '../run/expanded-run';
 import type { ConductorGroup, RunDocument } from '../run/run-document';
-import { conductorLimit } from '../pull/pulling-limits';
+import { carryingGroups, conductorLimit } from '../pull/pulling-limits';
 import { plain } from './explanation';
 import type { Explanation } from './explanation';
 
@@ -37,6 +36,7 @@ export function explainLimit(
     return {
       title: 'attachment',
       exact: `${plain(limits.attachment, 2)} lbf`,
+      shownTo: '1 lb',
       formula: 'min(1,000, T of the conductors)',
       worked: [`min(1000, ${plain(conductor, 2)}) = ${plain(limits.attachment, 2)} lbf`],
       inputs: [
@@ -51,8 +51,9 @@ export function explainLimit(
   return {
     title: 'conductor',
     exact: `${plain(conductor, 2)} lbf`,
+    shownTo: '1 lb',
     formula: 'T = S·n·A, × 0.8 for more than three, ≤ 10,000',
-    worked: set.map(worked),
+    worked: workedLimit(set, conductor),
     inputs: [
       {
         what: 'perCircularMil',
@@ -64,17 +65,26 @@ export function explainLimit(
   };
 }
 
-function worked(group: ConductorGroup): string {
-  if ('cable' in group) return `${group.count} × ${plain(group.cable.maxTension)} lbf`;
-  const { circularMils } = bareConductor(group.size, false);
-  const each = group.material === 'Cu' ? 0.008 : 0.006;
-  return `${group.count} × ${circularMils} × ${each} = ${plain(group.count * circularMils * each, 2)} lbf`;
+/** Those of the largest size carry it; the others ride along. */
+function workedLimit(set: readonly ConductorGroup[], limit: number): string[] {
+  const carrying = carryingGroups(set);
+  const whole = carrying.reduce((sum, { count, each }) => sum + count * each, 0);
+  const lines = carrying.map(({ count, each, size }) =>
+    size === 0
+      ? `${count} × ${plain(each)} = ${plain(count * each, 2)} lbf`
+      : `${count} × ${size} × ${plain(each / size)} = ${plain(count * each, 2)} lbf`,
+  );
+  const shared = carrying.reduce((sum, { count }) => sum + count, 0) > 3;
+  if (shared) lines.push(`${plain(whole, 2)} × 0.8 = ${plain(whole * 0.8, 2)} lbf`);
+  if (limit < (shared ? whole * 0.8 : whole)) lines.push(`≤ ${plain(limit)} lbf`);
+  return lines;
 }
 
 function own(title: string, exact: string, source: string): Explanation {
   return {
     title,
     exact,
+    shownTo: null,
     formula: '',
     worked: [],
     inputs: [{ what: 'limit', value: exact, source }],

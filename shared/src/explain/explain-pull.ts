@@ -5,10 +5,14 @@ import { degrees } from '../geometry/angles';
 import { analyzePull } from '../pull/analyze-pulls';
 import { plannedPulls } from '../pull/planned-pulls';
 import { pullChain } from '../pull/pull-chain';
+import { peaksAt, sidewallOf } from '../pull/pull-direction';
 import type { DirectionInput } from '../pull/pull-direction';
+import { EASY } from '../pull/pull-method';
 import type { PullPiece } from '../pull/pull-path';
 import { expandRun } from '../run/expand-run';
-import type { RunDocument } from '../run/run-document';
+import type { ExpandedRun } from '../run/expanded-run';
+import type { PullConditions, RunDocument } from '../run/run-document';
+import { forceStep } from '../units/format-force';
 import { formatLength } from '../units/format-length';
 import { plain } from './explanation';
 import type { Explanation, ExplanationInput } from './explanation';
@@ -30,26 +34,90 @@ const LEVEL_BEND = 'T₂ = T₁·cosh fθ + √(T₁² + (W·R)²)·sinh fθ';
 const ANY_BEND = 'dT/dψ = W·R·sin α + f·|W·R·z⊥ − T·n|';
 const CORNER = 'T₂ = T₁·e^(fθ)';
 
+/** Where the head is: it has left this element, or so many points of the profile after the feed. */
+type Until = string | number;
+
 /**
- * The tension at the puller, piece by piece: the formula of each kind of piece, its numbers, and what it leaves.
- * null where the pull has no figures.
+ * The tension where the head leaves a piece, else at the puller, piece by piece: the formula of each kind of piece, its
+ * numbers, and what it leaves. null where the pull has no figures.
  */
-export function explainTension(question: PullQuestion): Explanation | null {
-  const asked = inputOf(question);
-  if (!asked) return null;
-  const { input, friction } = asked;
-  const chain = pullChain(input.pieces, input.sets, friction, input.feed);
-  const worked = input.pieces.map((piece, index) => {
-    const entering = index === 0 ? chain.feed : (chain.tensions[index - 1] ?? 0);
-    return workedPiece(piece, input, friction, entering, chain.tensions[index] ?? 0);
-  });
-  const kinds = new Set(input.pieces.map(formulaOf));
+export function explainTension(question: PullQuestion, until?: Until): Explanation | null {
+  const walked = walkOf(question, until);
+  if (!walked) return null;
+  const { input, friction, feed, tensions, pieces, tension } = walked;
+  const worked = pieces.map((piece, index) =>
+    workedPiece(piece, input, friction, tensions[index - 1] ?? feed, tensions[index] ?? 0),
+  );
   return {
-    title: 'tension',
-    exact: `${plain(chain.tensions[chain.tensions.length - 1] ?? chain.feed, 2)} lbf`,
-    formula: [...kinds].join('\n'),
-    worked: [`T₀ = ${plain(chain.feed, 2)} lbf`, ...worked],
+    title: until === undefined ? 'tension' : 'tensionHere',
+    exact: `${plain(tension, 2)} lbf`,
+    shownTo: `${forceStep(tension)} lb`,
+    formula: [...new Set(pieces.map(formulaOf))].join('\n'),
+    worked: [`T₀ = ${plain(feed, 2)} lbf`, ...worked],
     inputs: inputsOf(question),
+  };
+}
+
+/** What a gauge at the puller reads while the head leaves a piece: the rope drags in the bends still ahead. */
+export function explainGauge(question: PullQuestion, until: Until): Explanation | null {
+  const walked = walkOf(question, until);
+  if (!walked) return null;
+  const { input, pieces, tension } = walked;
+  const ahead = input.pieces
+    .slice(pieces.length)
+    .reduce((sum, piece) => sum + (piece.kind === 'bend' ? piece.way.angle : 0), 0);
+  const { ropeFriction } = question.pull;
+  const reading = tension * Math.exp(ropeFriction * ahead);
+  return {
+    title: 'gauge',
+    exact: `${plain(reading, 2)} lbf`,
+    shownTo: `${forceStep(reading)} lb`,
+    formula: 'G = T·e^(µθ), θ of the bends ahead',
+    worked: [
+      `${plain(tension, 4)} × e^(${plain(ropeFriction)} × ${plain(ahead)}) = ${plain(reading, 2)} lbf`,
+    ],
+    inputs: [
+      {
+        what: 'ropeFriction',
+        value: plain(ropeFriction),
+        source: givenOr(question, 'ropeFriction', 'judgement, no source'),
+      },
+    ],
+  };
+}
+
+/** Who pulls: what the head feels at typical friction and if dry, against what one and two people pull and what gives first. */
+export function explainMethod(question: PullQuestion): Explanation | null {
+  const { pull, way } = question;
+  const { limits, method } = pull;
+  const peak = pull[way].peak;
+  const asked = inputOf(question);
+  if (!limits || !method || !peak || !asked) return null;
+  const { conductor, attachment, puller, rope, handOne, handTwo } = limits;
+  const lowest = Math.min(conductor, attachment, puller ?? Infinity, rope ?? Infinity);
+  const at = (friction: number) =>
+    `µ ${plain(friction)}: ${plain(peaksAt(asked.input, friction).tension, 2)} lbf`;
+  return {
+    title: 'method',
+    exact: `${plain(peak.likely, 2)} lbf`,
+    shownTo: `${forceStep(peak.likely, lowest)} lb`,
+    formula: 'max T',
+    worked: [
+      at(pull.friction.likely),
+      ...(method.flipsAt === null ? [] : [at(method.flipsAt)]),
+      at(pull.friction.high),
+    ],
+    inputs: [
+      { what: 'easy', value: `${EASY} lbf`, source: 'judgement, no source' },
+      { what: 'handOne', value: `${plain(handOne)} lbf`, source: OWN },
+      { what: 'handTwo', value: `${plain(handTwo)} lbf`, source: OWN },
+      {
+        what: 'limit',
+        value: `${plain(lowest, 2)} lbf`,
+        source: 'the lowest stop limit of the pull',
+      },
+      ...inputsOf(question),
+    ],
   };
 }
 
@@ -62,36 +130,46 @@ export function explainHoldBack(question: PullQuestion): Explanation | null {
   return {
     title: 'holdBack',
     exact: `${plain(holdBack, 2)} lbf`,
+    shownTo: `${forceStep(holdBack)} lb`,
     formula: `${STRAIGHT}\nT ≥ 0`,
     worked: [`T₀ = ${plain(feed, 2)} lbf ≥ ${plain(input.feed, 2)} lbf`],
     inputs: inputsOf(question),
   };
 }
 
-/** The pressure on the worst conductor in the bend of the largest: its share of the tension over the inside radius. */
-export function explainSidewall(question: PullQuestion): Explanation | null {
+/**
+ * The pressure on the worst conductor, in the bend of the largest or at a point of the profile: its share of the tension over
+ * the inside radius.
+ */
+export function explainSidewall(question: PullQuestion, point?: number): Explanation | null {
   const asked = inputOf(question);
   if (!asked) return null;
   const { input, friction } = asked;
-  const direction = question.pull[question.way];
-  const at = direction.peakSidewallAt;
+  const { profile, peakSidewall } = question.pull[question.way];
   const { feed, tensions } = pullChain(input.pieces, input.sets, friction, input.feed);
-  const index = input.pieces.findIndex(
-    ({ elementId, kind }) => elementId === at && kind === 'bend',
-  );
+  // The profile has one point before the first piece.
+  const worst = peakSidewall?.[question.level];
+  const ofWorst = profile.findIndex(({ sidewall }) => sidewall?.[question.level] === worst);
+  const index = (point ?? ofWorst) - 1;
   const piece = input.pieces[index];
   const set = piece && input.sets[piece.section];
   if (!piece || piece.kind !== 'bend' || !set) return null;
-  const tension = Math.max(index === 0 ? feed : (tensions[index - 1] ?? 0), tensions[index] ?? 0);
+  const [entering, leaving] = [tensions[index - 1] ?? feed, tensions[index] ?? 0];
+  const tension = Math.max(entering, leaving);
   const inside = piece.way.radius - (piece.bearsOn === 'wall' ? set.bore / 24 : 0);
-  const pressure = (set.sidewallShare * tension) / inside;
+  const pressure = sidewallOf(piece, set, entering, leaving);
   return {
     title: 'sidewall',
     exact: `${plain(pressure, 2)} lb/ft`,
+    shownTo: `${forceStep(pressure, question.pull.limits?.sidewall.stop ?? null)} lb/ft`,
     formula: `P = ${SHARES[set.configuration]}·T / (R − D/2)`,
-    worked: [
-      `P = ${plain(set.sidewallShare)} × ${plain(tension, 2)} / ${plain(inside)} = ${plain(pressure, 2)} lb/ft`,
-    ],
+    // A radius within the bore is no bend; the check of the radius says so.
+    worked:
+      inside <= 0
+        ? [`R − D/2 = ${plain(inside)} ft`]
+        : [
+            `P = ${plain(set.sidewallShare)} × ${plain(tension, 2)} / ${plain(inside)} = ${plain(pressure, 2)} lb/ft`,
+          ],
     inputs: [
       ...inputsOf(question),
       {
@@ -118,7 +196,37 @@ function inputOf({ document, settings, pull, way, level }: PullQuestion) {
   const context = checkContext(document, expandRun(document, settings), settings);
   const span = plannedPulls(document, context.expanded).find((each) => each.pull.id === pull.id);
   const inputs = span && analyzePull(context, span).inputs;
-  return inputs ? { input: inputs[way], friction: pull.friction[level] } : null;
+  return inputs
+    ? { expanded: context.expanded, input: inputs[way], friction: pull.friction[level] }
+    : null;
+}
+
+/** A pull up to where the head leaves an element; to the puller where none is named. */
+function walkOf(question: PullQuestion, until?: Until) {
+  const asked = inputOf(question);
+  if (!asked) return null;
+  const { input, friction } = asked;
+  const { feed, tensions } = pullChain(input.pieces, input.sets, friction, input.feed);
+  const all = input.pieces.length;
+  const count = typeof until === 'string' ? piecesUntil(question, asked, until) : (until ?? all);
+  const pieces = input.pieces.slice(0, count);
+  return { input, friction, feed, tensions, pieces, tension: tensions[count - 1] ?? feed };
+}
+
+/** How many pieces the head has left behind at an element. A box pulled straight through is no piece: its place counts. */
+function piecesUntil(
+  { pull, way }: PullQuestion,
+  { expanded, input }: { expanded: ExpandedRun; input: DirectionInput },
+  until: string,
+): number {
+  const { profile, feedAt, pullAt } = pull[way];
+  if (until === feedAt) return 0;
+  if (until === pullAt) return input.pieces.length;
+  const last = profile.map(({ elementId }) => elementId).lastIndexOf(until);
+  if (last >= 0) return last;
+  const at = expanded.elements.find(({ element }) => element.id === until)?.from;
+  const place = profile.findIndex(({ station }) => station === at);
+  return place < 0 ? input.pieces.length : place;
 }
 
 function formulaOf(piece: PullPiece): string {
@@ -142,18 +250,24 @@ function workedPiece(
   if (piece.kind === 'straight') {
     const { length, rise, run } = piece.way;
     const cos = plain(run);
-    return `${from} + ${plain(weight)} × ${plain(length, 2)} × (${plain(rise)} + ${f} × ${cos}) = ${to}`;
+    return `${from} + ${plain(weight)} × ${plain(length)} × (${plain(rise)} + ${f} × ${cos}) = ${to}`;
   }
   const { angle, radius } = piece.way;
   return `${plain(degrees(angle), 2)}°, R ${formatLength(radius * 12, { to: 16 })}, f ${f}: ${from} → ${to}`;
 }
 
 const GIVEN = 'given on the run';
+const OWN = 'given on the run or by the company; judgement from published push and pull strengths';
 
-function inputsOf({ document, pull, way, level }: PullQuestion): ExplanationInput[] {
-  const { conditions = {} } = document;
-  const given = (key: keyof typeof conditions, otherwise: string) =>
-    conditions[key] === undefined ? otherwise : GIVEN;
+const givenOr = (
+  { document: { conditions = {} } }: PullQuestion,
+  key: keyof PullConditions,
+  otherwise: string,
+): string => (conditions[key] === undefined ? otherwise : GIVEN);
+
+function inputsOf(question: PullQuestion): ExplanationInput[] {
+  const { pull, way, level } = question;
+  const given = (key: keyof PullConditions, otherwise: string) => givenOr(question, key, otherwise);
   return [
     {
       what: 'weight',
@@ -163,7 +277,10 @@ function inputsOf({ document, pull, way, level }: PullQuestion): ExplanationInpu
     {
       what: 'weightCorrection',
       value: plain(pull.weightCorrection ?? 1),
-      source: 'from D and d, NEC Chapter 9 Tables 4 and 5',
+      source:
+        pull.configuration === 'complex'
+          ? 'a convention for sets that cannot be derived'
+          : 'from D and d, NEC Chapter 9 Tables 4 and 5',
     },
     {
       what: 'friction',

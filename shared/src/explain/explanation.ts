@@ -13,6 +13,8 @@ export interface Explanation {
   title: string;
   /** The figure, unrounded as far as anybody reads. */
   exact: string;
+  /** To what the screen rounds it, "1″"; null: it shows it whole. */
+  shownTo: string | null;
   formula: string;
   /** The formula with its numbers in it, a line for each step. */
   worked: string[];
@@ -21,5 +23,5 @@ export interface Explanation {
 
 /** A number with at most `places` decimals and no zeros after them. */
 export function plain(value: number, places = 4): string {
-  return String(Number(value.toFixed(places)));
+  return String(Number(value.toFixed(places))).replace('-', '−');
 }

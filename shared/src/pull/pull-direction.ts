@@ -35,7 +35,12 @@ const band = (of: (level: (typeof LEVELS)[number]) => number): Band => ({
 });
 
 /** lb/ft on the worst conductor of a set leaving a bend: its share of the larger tension over the inside radius. */
-function sidewallOf(piece: PullPiece, set: PullSet, entering: number, leaving: number): number {
+export function sidewallOf(
+  piece: PullPiece,
+  set: PullSet,
+  entering: number,
+  leaving: number,
+): number {
   if (piece.kind !== 'bend' || piece.bearsOn === 'unknown') return 0;
   const inside = piece.way.radius - (piece.bearsOn === 'wall' ? set.bore / 2 / INCHES : 0);
   return inside > 0 ? (set.sidewallShare * Math.max(entering, leaving)) / inside : 0;

@@ -25,6 +25,16 @@ export const BASKET_GRIP = 1000;
  * @example conductorLimit(3×12 Cu) // 156.72
  */
 export function conductorLimit(set: readonly ConductorGroup[]): number {
+  const carrying = carryingGroups(set);
+  const count = carrying.reduce((sum, each) => sum + each.count, 0);
+  const sum = carrying.reduce((total, { count: own, each }) => total + own * each, 0);
+  return Math.min(MOST, sum * (count > MOST_SHARING_EVENLY ? SHARED : 1));
+}
+
+/** The conductors of a set that carry its pull, with what each may, lbf. */
+export function carryingGroups(
+  set: readonly ConductorGroup[],
+): { count: number; each: number; size: number }[] {
   const carried = set.map((group) => ({
     count: group.count,
     diameter: conductorDimensions(group)?.diameter ?? 0,
@@ -35,16 +45,13 @@ export function conductorLimit(set: readonly ConductorGroup[]): number {
         : bareConductor(group.size, false).circularMils * PER_CIRCULAR_MIL[group.material],
   }));
   const [largest] = [...carried].sort((a, b) => b.size - a.size || b.diameter - a.diameter);
-  if (!largest) return 0;
+  if (!largest) return [];
   // Cables have no size to compare: where there are any, the widest things in the set carry it.
   const hasCable = carried.some(({ size }) => size === 0);
   const widest = Math.max(...carried.map(({ diameter }) => diameter));
-  const carrying = carried.filter(({ size, diameter }) =>
+  return carried.filter(({ size, diameter }) =>
     hasCable ? diameter === widest : size === largest.size,
   );
-  const count = carrying.reduce((sum, each) => sum + each.count, 0);
-  const sum = carrying.reduce((total, { count: own, each }) => total + own * each, 0);
-  return Math.min(MOST, sum * (count > MOST_SHARING_EVENLY ? SHARED : 1));
 }
 
 /** Every limit of a pull: of its conductors, of how they are attached, and what the run or the company sets. */

@@ -15,13 +15,23 @@ function stepFor(force: number): number {
  * @example formatForce(248, 249) // "248"
  */
 export function formatForce(force: number, limit: number | null = null): string {
-  for (const step of [stepFor(force), 1, 0.1, 0.01]) {
+  const step = forceStep(force, limit);
+  return grouped.format(Math.round(force / step) * step);
+}
+
+/**
+ * To what `formatForce` rounds a figure, in its own unit.
+ *
+ * @example forceStep(1866.5) // 50
+ */
+export function forceStep(force: number, limit: number | null = null): number {
+  const keepsSide = (step: number) => {
     const shown = Math.round(force / step) * step;
-    const keepsSide =
-      limit === null || force === limit || (shown !== limit && shown > limit === force > limit);
-    if (keepsSide) return grouped.format(shown);
-  }
-  return grouped.format(force);
+    return (
+      limit === null || force === limit || (shown !== limit && shown > limit === force > limit)
+    );
+  };
+  return [stepFor(force), 1, 0.1].find(keepsSide) ?? 0.01;
 }
 
 /** A limit, exactly as it is. `formatLimit(156.72)` is "157": to the pound, as nobody sets one finer. */

@@ -1,4 +1,10 @@
-import { explainFill, explainJam, formatPercent } from '@fairlead/shared';
+import {
+  explainClearance,
+  explainFill,
+  explainJam,
+  explainRoom,
+  formatPercent,
+} from '@fairlead/shared';
 import type { SectionAnalysis, Status } from '@fairlead/shared';
 import { StatusGlyph } from '../../../../components/drawing/status-glyph';
 import { useWords } from '../../../../hooks/use-words';
@@ -49,6 +55,15 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
           oval: ratioText(jam.ratioWithOvality),
         })
       : say('workbench.conductors.jamClear');
+  const roomWords =
+    room.length === 0
+      ? say('workbench.conductors.roomNone')
+      : room
+          .map(({ size, count }) => say('workbench.conductors.roomSize', { count, size }))
+          .join(', ');
+  const clearanceWords = say('workbench.conductors.clearanceValue', {
+    clearance: clearanceText(clearance ?? 0),
+  });
   const percent = say('workbench.conductors.percentOf', {
     percent: formatPercent(fill.percent).replace(/\s*%$/, ''),
     limit: formatPercent(fill.limitPercent),
@@ -75,11 +90,9 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
         </small>
       </td>
       <td {...cell('room')}>
-        {room.length === 0
-          ? say('workbench.conductors.roomNone')
-          : room
-              .map(({ size, count }) => say('workbench.conductors.roomSize', { count, size }))
-              .join(', ')}
+        <Explained name={roomWords} explain={() => explainRoom(document, expanded, section)}>
+          {roomWords}
+        </Explained>
       </td>
       <td {...cell('jam')}>
         {jam === null ? (
@@ -91,9 +104,16 @@ export function FillRow({ section }: { section: SectionAnalysis }) {
         )}
       </td>
       <td {...cell('clearance')}>
-        {clearance === null
-          ? say('workbench.list.none')
-          : say('workbench.conductors.clearanceValue', { clearance: clearanceText(clearance) })}
+        {clearance === null ? (
+          say('workbench.list.none')
+        ) : (
+          <Explained
+            name={clearanceWords}
+            explain={() => explainClearance(document, expanded, section)}
+          >
+            {clearanceWords}
+          </Explained>
+        )}
       </td>
     </tr>
   );

@@ -59,11 +59,15 @@ export function Explained({ children, name, explain }: Props) {
 
 function ExplanationText({ explanation }: { explanation: Explanation }) {
   const { say } = useWords();
-  const { title, exact, formula, worked, inputs } = explanation;
+  const { title, exact, shownTo, formula, worked, inputs } = explanation;
   return (
     <div tabIndex={-1} data-autofocus>
       <h3 className={classes.title}>{say(`explain.title.${title}` as WordKey)}</h3>
-      <p className={classes.exact}>{say('explain.exact', { value: exact })}</p>
+      <p className={classes.exact}>
+        {shownTo === null
+          ? say('explain.exact', { value: exact })
+          : say('explain.exactShown', { value: exact, step: shownTo })}
+      </p>
       {formula !== '' && (
         <>
           <h4 className={classes.part}>{say('explain.formula')}</h4>

@@ -1,10 +1,12 @@
-import { formatForce } from '@fairlead/shared';
+import { explainCorrection, explainMethod, explainWeight, formatForce } from '@fairlead/shared';
 import type { PullAnalysis } from '@fairlead/shared';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
 import { useCommands } from '../commands/commands-context';
 import fieldClasses from '../fields/fields.module.css';
+import { Explained } from '../explain/explained';
 import { useLabelOf } from '../hooks/use-labels';
+import { useSettings } from '../hooks/use-settings';
 import { usePlan } from './use-plan';
 import { FeedEnds } from './feed-ends';
 import { PullProfile } from './pull-profile';
@@ -63,13 +65,11 @@ export function PullCard({ pull, next }: Props) {
         </>
       )}
       {pull.weight !== null && pull.configuration !== null && (
-        <p className={classes.small}>
-          {say('workbench.pull.set', {
-            weight: pull.weight.toFixed(3),
-            configuration: say(`workbench.pull.configuration.${pull.configuration}`),
-            correction: (pull.weightCorrection ?? 1).toFixed(4),
-          })}
-        </p>
+        <SetLine
+          pull={pull}
+          weight={pull.weight}
+          configuration={say(`workbench.pull.configuration.${pull.configuration}`)}
+        />
       )}
       {canEdit && (
         <div className={classes.acts}>
@@ -101,11 +101,62 @@ export function PullCard({ pull, next }: Props) {
   );
 }
 
-/** "Two people. Puller above friction 0.39. Typical 85 lb." */
+interface SetLineProps {
+  pull: PullAnalysis;
+  /** lb/ft. */
+  weight: number;
+  configuration: string;
+}
+
+/** "5.149 lb/ft, three in a cradle, weight correction 1.2073". */
+function SetLine({ pull, weight, configuration }: SetLineProps) {
+  const { say } = useWords();
+  const document = useRunEditor((state) => state.document);
+  const expanded = useRunEditor((state) => state.expanded);
+  const weighs = say('workbench.pull.weight', { weight: weight.toFixed(3) });
+  const correction = say('workbench.pull.correction', {
+    correction: (pull.weightCorrection ?? 1).toFixed(4),
+  });
+  return (
+    <p className={classes.small}>
+      <Explained name={weighs} explain={() => explainWeight(document, expanded, pull)}>
+        {weighs}
+      </Explained>
+      {`, ${configuration}, `}
+      <Explained name={correction} explain={() => explainCorrection(document, expanded, pull)}>
+        {correction}
+      </Explained>
+    </p>
+  );
+}
+
+/** "Two people. Puller above friction 0.39. Typical 85 lb."; where the feed must be held, that and the most it carries. */
 function Method({ pull, likely }: { pull: PullAnalysis; likely: string }) {
   const { say } = useWords();
-  const { method } = pull;
+  const labelOf = useLabelOf();
+  const document = useRunEditor((state) => state.document);
+  const settings = useSettings();
+  const { method, planned } = pull;
   if (!method) return null;
+  const { holdBack, feedAt } = pull[planned];
+  const explain = () => explainMethod({ document, settings, pull, way: planned, level: 'likely' });
+  if (holdBack && holdBack.likely > 0) {
+    const carries = say('workbench.pull.carries', { pounds: likely });
+    return (
+      <p className={classes.method} data-method={method.likely}>
+        <b>
+          {say('workbench.pull.held', {
+            pounds: formatForce(holdBack.likely),
+            place: labelOf(feedAt),
+          })}
+        </b>{' '}
+        <Explained name={carries} explain={explain}>
+          {carries}
+        </Explained>
+      </p>
+    );
+  }
+  const typical = say('workbench.pull.typical', { likely });
   const name = (of: typeof method.likely) => say(`workbench.pull.method.${of}`);
   return (
     <p className={classes.method} data-method={method.likely}>
@@ -118,7 +169,12 @@ function Method({ pull, likely }: { pull: PullAnalysis; likely: string }) {
           })}
         </span>
       )}{' '}
-      <span>{`${say('workbench.pull.typical', { likely })}.`}</span>{' '}
+      <span>
+        <Explained name={typical} explain={explain}>
+          {typical}
+        </Explained>
+        .
+      </span>{' '}
       {method.high !== method.likely && (
         <span>{say('workbench.pull.dryMethod', { method: name(method.high).toLowerCase() })}</span>
       )}

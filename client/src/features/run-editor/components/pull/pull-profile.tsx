@@ -1,17 +1,39 @@
-import { formatForce } from '@fairlead/shared';
-import type { PullAnalysis } from '@fairlead/shared';
+import { explainGauge, explainSidewall, explainTension, formatForce } from '@fairlead/shared';
+import type { Explanation, PullAnalysis, PullQuestion } from '@fairlead/shared';
 import { useWords } from '../../../../hooks/use-words';
+import { useRunEditor } from '../../state/use-run-editor';
+import { Explained } from '../explain/explained';
 import { useLabelOf } from '../hooks/use-labels';
+import { useSettings } from '../hooks/use-settings';
 import { listLength } from '../model/list-length';
 import { lowestAllowed } from './pull-words';
 import classes from './pull.module.css';
+
+const LEVELS = ['low', 'likely', 'high'] as const;
 
 /** The tension along the planned way, piece by piece, and what a gauge at the puller would read. */
 export function PullProfile({ pull }: { pull: PullAnalysis }) {
   const { say } = useWords();
   const labelOf = useLabelOf();
   const allowed = lowestAllowed(pull);
+  const document = useRunEditor((state) => state.document);
+  const settings = useSettings();
   const { profile } = pull[pull.planned];
+  const asking = (level: PullQuestion['level']): PullQuestion => ({
+    document,
+    settings,
+    pull,
+    way: pull.planned,
+    level,
+  });
+  const opened = (force: number, limit: number | null, explain: () => Explanation | null) => (
+    <Explained
+      name={say('workbench.list.pounds', { pounds: formatForce(force, limit) })}
+      explain={explain}
+    >
+      {formatForce(force, limit)}
+    </Explained>
+  );
   return (
     <details className={classes.profile}>
       <summary>{say('workbench.pull.profile')}</summary>
@@ -36,11 +58,21 @@ export function PullProfile({ pull }: { pull: PullAnalysis }) {
                   {index === 0 && <small>{say('workbench.pull.start')}</small>}
                 </th>
                 <td>{listLength(station)}</td>
-                <td>{formatForce(tension.low, allowed)}</td>
-                <td>{formatForce(tension.likely, allowed)}</td>
-                <td>{formatForce(tension.high, allowed)}</td>
-                <td>{sidewall ? formatForce(sidewall.likely) : say('workbench.list.none')}</td>
-                <td>{formatForce(tension.likely * ropeFactor)}</td>
+                {LEVELS.map((level) => (
+                  <td key={level}>
+                    {opened(tension[level], allowed, () => explainTension(asking(level), index))}
+                  </td>
+                ))}
+                <td>
+                  {sidewall
+                    ? opened(sidewall.likely, null, () => explainSidewall(asking('likely'), index))
+                    : say('workbench.list.none')}
+                </td>
+                <td>
+                  {opened(tension.likely * ropeFactor, null, () =>
+                    explainGauge(asking('likely'), index),
+                  )}
+                </td>
               </tr>
             ))}
           </tbody>

@@ -1,8 +1,9 @@
-import { BOUNDS, analyzeRun, formatForce } from '@fairlead/shared';
-import type { PullAnalysis, PullConditions } from '@fairlead/shared';
+import { BOUNDS, analyzeRun, explainTension, formatForce } from '@fairlead/shared';
+import type { PullAnalysis, PullConditions, RunDocument } from '@fairlead/shared';
 import { useMemo, useState } from 'react';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
+import { Explained } from '../explain/explained';
 import { useEdit } from '../hooks/use-edit';
 import { useLabelOf } from '../hooks/use-labels';
 import { useSettings } from '../hooks/use-settings';
@@ -75,7 +76,12 @@ export function WhatIfCard() {
         <>
           <ul className={classes.outcomes}>
             {then.map((pull, index) => (
-              <Outcome key={pull.id} now={planned[index] ?? null} then={pull} />
+              <Outcome
+                key={pull.id}
+                now={planned[index] ?? null}
+                then={pull}
+                document={{ ...document, conditions }}
+              />
             ))}
           </ul>
           <div className={classes.acts}>
@@ -102,8 +108,16 @@ export function WhatIfCard() {
 }
 
 /** "Feed at B: two people, 85 lb; now puller, 120 lb." */
-function Outcome({ now, then }: { now: PullAnalysis | null; then: PullAnalysis }) {
+interface OutcomeProps {
+  now: PullAnalysis | null;
+  then: PullAnalysis;
+  /** The run as tried. */
+  document: RunDocument;
+}
+
+function Outcome({ now, then, document }: OutcomeProps) {
   const { say } = useWords();
+  const settings = useSettings();
   const labelOf = useLabelOf();
   const told = (pull: PullAnalysis | null): string => {
     const direction = pull?.[pull.planned];
@@ -113,13 +127,17 @@ function Outcome({ now, then }: { now: PullAnalysis | null; then: PullAnalysis }
       pounds: formatForce(direction.tension.likely, lowestAllowed(pull)),
     });
   };
+  const outcome = say('workbench.pull.whatIfOutcome', {
+    feed: labelOf(then[then.planned].feedAt),
+    then: told(then),
+    now: told(now),
+  });
+  const question = { document, settings, pull: then, way: then.planned, level: 'likely' } as const;
   return (
     <li data-what-if={then.id}>
-      {say('workbench.pull.whatIfOutcome', {
-        feed: labelOf(then[then.planned].feedAt),
-        then: told(then),
-        now: told(now),
-      })}
+      <Explained name={outcome} explain={() => explainTension(question)}>
+        {outcome}
+      </Explained>
     </li>
   );
 }

@@ -7,6 +7,7 @@ import { useLabelOf } from '../hooks/use-labels';
 import { useSelectedPiece } from '../hooks/use-piece';
 import { PieceFields } from '../pieces/piece-fields';
 import { sectionOf } from '../model/section-of';
+import { PieceFigures } from './piece-figures';
 import classes from './rail.module.css';
 
 /** The selected piece with every field it has. */
@@ -50,6 +51,7 @@ export function SelectedPiece({ isBare = false }: { isBare?: boolean }) {
       <div className={classes.fields}>
         <PieceFields key={piece.id} piece={piece} sectionId={section?.id ?? null} />
       </div>
+      <PieceFigures piece={piece} />
       <div className={classes.acts}>
         <button
           type="button"
