@@ -30,10 +30,14 @@ export interface SizedGroup extends ConductorDimensions {
 }
 
 export function sizedGroups(groups: readonly ConductorGroup[]): SizedGroup[] {
-  return groups.flatMap((group) => {
+  const sized: SizedGroup[] = [];
+  for (const group of groups) {
     const dimensions = conductorDimensions(group);
-    return dimensions === null ? [] : [{ ...dimensions, group, count: group.count }];
-  });
+    if (dimensions === null) continue;
+    const { diameter, area } = dimensions;
+    sized.push({ diameter, area, group, count: group.count });
+  }
+  return sized;
 }
 
 export const countOf = (sized: readonly SizedGroup[]): number =>

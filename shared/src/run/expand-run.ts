@@ -51,7 +51,8 @@ export function expandRun(
     const { before: headingBefore = null, after: heading = null } = headings.of[index] ?? {};
     const extent = extents[index] ?? { from: 0, to: 0 };
     const own = bendsOf[index] ?? [];
-    return { element, index, ...extent, section, bends: own, raceway, heading, headingBefore };
+    const { from, to } = extent;
+    return { element, index, from, to, section, bends: own, raceway, heading, headingBefore };
   });
   const isKnown = stretches && headings.directions === 'given';
   return {

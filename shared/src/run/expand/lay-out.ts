@@ -82,11 +82,29 @@ export function layOut(
   }
 
   return {
-    bends: unplaced.map((bend, index) => ({ ...bend, ...(bendExtents[index] as Extent) })),
+    bends: unplaced.map((bend, index) => placedBend(bend, bendExtents[index] as Extent)),
     legs,
     stretches,
     extents: extents.map((extent) => extent ?? { from: 0, to: 0 }),
     length: station,
+  };
+}
+
+/** Field by field: spread objects are most of the time of laying out a run. */
+function placedBend(bend: UnplacedBend, { from, to }: Extent): PlacedBend {
+  const { elementId, elementIndex, section, angle, radius, raceway, counts, planned, part } = bend;
+  return {
+    elementId,
+    elementIndex,
+    section,
+    angle,
+    radius,
+    from,
+    to,
+    raceway,
+    counts,
+    planned,
+    part,
   };
 }
 

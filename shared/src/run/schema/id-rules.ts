@@ -13,25 +13,34 @@ export function duplicateIds(document: Loose): Problem[] {
 
 interface IdPlace {
   id: string;
-  pointer: string;
+  key: string;
+  index: number;
 }
 
 function idsOf(key: string, list: unknown): IdPlace[] {
-  return asList(list).flatMap((part, index) => {
+  const places: IdPlace[] = [];
+  asList(list).forEach((part, index) => {
     const id = asText(part.id);
-    return id === null ? [] : [{ id, pointer: pointerOf([key, index, 'id']) }];
+    if (id !== null) places.push({ id, key, index });
   });
+  return places;
 }
 
 function repeated(places: readonly IdPlace[]): Problem[] {
-  const first = new Map<string, string>();
-  return places.flatMap(({ id, pointer }) => {
+  const first = new Map<string, IdPlace>();
+  const pointer = ({ key, index }: IdPlace) => pointerOf([key, index, 'id']);
+  const problems: Problem[] = [];
+  for (const place of places) {
+    const { id } = place;
     const before = first.get(id);
-    if (before === undefined) first.set(id, pointer);
-    return before === undefined
-      ? []
-      : [{ pointer, code: 'duplicate-id', found: shownFound(id), allowed: { usedAt: before } }];
-  });
+    if (before === undefined) first.set(id, place);
+    else {
+      const allowed = { usedAt: pointer(before) };
+      const found = shownFound(id);
+      problems.push({ pointer: pointer(place), code: 'duplicate-id', found, allowed });
+    }
+  }
+  return problems;
 }
 
 /** `from` and `to` of groups and pulls name pull points, the first before the second. */

@@ -18,7 +18,9 @@ export function shortened(text: string): string {
 
 /** One step of a JSON pointer (RFC 6901: `~` is `~0`, `/` is `~1`). */
 export function pointerStep(key: PropertyKey): string {
-  return `/${String(key).replace(/~/g, '~0').replace(/\//g, '~1')}`;
+  const text = String(key);
+  // Nearly every key is plain, and every value of a document is met here.
+  return /[~/]/.test(text) ? `/${text.replace(/~/g, '~0').replace(/\//g, '~1')}` : `/${text}`;
 }
 
 export function pointerOf(path: readonly PropertyKey[]): string {
