@@ -101,7 +101,7 @@ export function drawStrip(options: StripOptions): StripDrawing {
   });
   const limit = steps[0]?.limit ?? 0;
   const limitText = say('strip.limit', { degrees: formatAngle(limit) });
-  const throughIds = new Set(pulls.flatMap(({ through }) => through.map(({ id }) => id)));
+  const throughIds = new Set(analysis.pulls.flatMap(({ through }) => through));
   const marks: Mark[] = [
     ...selection(places.elements, selectedId, rows.axis, look.halfBox + 4, sun),
     ...(hasPulls ? pullMarks() : []),

@@ -1,4 +1,4 @@
-import { formatAngle, formatForce } from '@fairlead/shared';
+import { degreesStatus, formatAngle, formatForce } from '@fairlead/shared';
 import { StatusGlyph } from '../../../../components/drawing/status-glyph';
 import { useWords } from '../../../../hooks/use-words';
 import { useRunEditor } from '../../state/use-run-editor';
@@ -21,7 +21,7 @@ export function Ledger() {
   const remaining = wordRemaining(section, say);
   return (
     <div className={classes.ledger} role="status">
-      {remaining.isOver && <StatusGlyph status="over" size={22} />}
+      {remaining.isOver && <StatusGlyph status={degreesStatus(analysis, section.id)} size={22} />}
       <span>
         {say('workbench.ledger.since', {
           from: labelOf(section.from),

@@ -13,6 +13,7 @@ import classes from './phone.module.css';
 
 /** The pieces under a thumb: a tap selects one and opens its fields. */
 export function PhoneList({ onOpen }: { onOpen: (pieceId: string) => void }) {
+  const { say } = useWords();
   const sections = useSections();
   const selected = useSelectedPiece();
   const list = useRef<HTMLDivElement>(null);
@@ -33,6 +34,7 @@ export function PhoneList({ onOpen }: { onOpen: (pieceId: string) => void }) {
           </ul>
         </section>
       ))}
+      <p className={classes.caution}>{say('workbench.caution')}</p>
     </div>
   );
 }

@@ -65,6 +65,7 @@ export function ToFix({ onGo, isBare = false }: Props) {
           </ul>
         </details>
       )}
+      <p className={classes.caution}>{say('workbench.caution')}</p>
     </section>
   );
 }
