@@ -9,13 +9,14 @@ function steps(pointer: string): string[] {
     .map((step) => step.replace(/~1/g, '/').replace(/~0/g, '~'));
 }
 
-/** A copy with the value at a pointer replaced or added. The value may be anything, JSON or not. */
+/** A copy with the value at a pointer replaced or added. The value may be anything, JSON or not. A list's length is no place. */
 export function withValue(json: Json, pointer: string, value: unknown): Json {
   const keys = steps(pointer);
   const last = keys.pop();
   if (last === undefined) return value;
   const copy: Json = structuredClone(json);
   const holder = keys.reduce<Json>((inner, key) => (inner as Holder)[key], copy) as Holder;
+  if (Array.isArray(holder) && last === 'length') return copy;
   Object.defineProperty(holder, last, {
     value,
     enumerable: true,

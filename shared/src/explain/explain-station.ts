@@ -42,7 +42,7 @@ function workedPiece({ bends }: ExpandedRun, { from, to, bends: own }: PlacedEle
   });
   const straight = to - from - arcs.reduce((sum, arc) => sum + radians(arc.angle) * arc.radius, 0);
   const parts = [
-    ...(Math.abs(straight) > 5e-5 ? [plain(straight)] : []),
+    ...(Math.abs(straight) > 5e-5 || arcs.length === 0 ? [plain(straight)] : []),
     ...arcs.map(({ angle, radius }) => `${plain(angle)} × π / 180 × ${plain(radius)}`),
   ];
   return `${plain(from)} + ${parts.join(' + ')} = ${plain(to)} in`;
