@@ -44,6 +44,19 @@ describe('3×500 and a 3 in 3 EMT, three 90s', () => {
     );
   });
 
+  it('fed at A the head carries 43, 478, 928 and 1,845 lbf on its way; a gauge reads the rope in the bends ahead with it', () => {
+    const { forward } = only('feeder');
+    const [, , bend1, straight2, bend2, , bend3] = forward.profile;
+    const carried = [bend1, straight2, bend2, bend3].map((point) => point?.tension.likely ?? 0);
+    expect(carried.map(Math.round)).toEqual([43, 478, 928, 1845]);
+    // Past the first bend two of 90° are ahead of the head: e^(µπ).
+    const document = { ...PULL_RUNS.feeder() };
+    document.conditions = { ...document.conditions, ropeFriction: 0.2 };
+    const [pull] = analyzeRun(document).pulls;
+    expect(pull?.forward.profile[2]?.ropeFactor).toBeCloseTo(Math.exp(0.2 * Math.PI), 9);
+    expect(pull?.forward.profile[7]?.ropeFactor).toBe(1);
+  });
+
   it('50 lbf of feed at A adds about 365 at the puller: 2,231', () => {
     const [none, fifty] = [only('feeder'), only('feeder50')];
     expect(fifty.forward.tension?.likely).toBeCloseTo(2231.4, 0);
