@@ -9,7 +9,7 @@ import path from 'node:path';
 import subsetFont from 'subset-font';
 import { unicodeRange, woff2Coverage } from './woff2-coverage.mjs';
 
-const SIGNS = '≤≥≠≈±−×·µμθΔΣ√∞←↑→↓↔✓′″½¼¾⅛⅜⅝⅞⁄⁰¹²³⁴⁵⁶⁷⁸⁹₀₁₂₃₄₅₆₇₈₉°Ø‹›…–';
+const SIGNS = '≤≥≠≈±−×·µμαθπψΔΣ√∞←↑→↓↔✓′″½¼¾⅛⅜⅝⅞⁄⁰¹²³⁴⁵⁶⁷⁸⁹₀₁₂₃₄₅₆₇₈₉°Ø‹›…–';
 const WEIGHTS = [
   [400, 'Regular'],
   [600, 'SemiBold'],

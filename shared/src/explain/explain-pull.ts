@@ -31,7 +31,7 @@ export interface PullQuestion {
 
 const STRAIGHT = 'T₂ = T₁ + W·L·(sin α + f·cos α)';
 const LEVEL_BEND = 'T₂ = T₁·cosh fθ + √(T₁² + (W·R)²)·sinh fθ';
-const ANY_BEND = 'dT/dψ = W·R·sin α + f·|W·R·z⊥ − T·n|';
+const ANY_BEND = 'dT/dψ = W·R·sin α + f·|W·R·q − T·n|';
 const CORNER = 'T₂ = T₁·e^(fθ)';
 
 /** Where the head is: it has left this element, or so many points of the profile after the feed. */
@@ -54,7 +54,7 @@ export function explainTension(question: PullQuestion, until?: Until): Explanati
     shownTo: `${forceStep(tension)} lb`,
     formula: [...new Set(pieces.map(formulaOf))].join('\n'),
     worked: [`T₀ = ${plain(feed, 2)} lbf`, ...worked],
-    inputs: inputsOf(question),
+    inputs: [...inputsOf(question), ...(pieces.some(isSolved) ? [AXES] : [])],
   };
 }
 
@@ -228,6 +228,14 @@ function piecesUntil(
   const place = profile.findIndex(({ station }) => station === at);
   return place < 0 ? input.pieces.length : place;
 }
+
+/** A bend in a plane of no closed form on the level: its equation is solved step by step. */
+const isSolved = (piece: PullPiece): boolean => formulaOf(piece) === ANY_BEND;
+const AXES = {
+  what: 'axes',
+  value: '',
+  source: 'q upright across the pipe, n toward the centre of the bend; solved along ψ from 0 to θ',
+};
 
 function formulaOf(piece: PullPiece): string {
   if (piece.kind === 'straight') return STRAIGHT;

@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { readFileSync, readdirSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
 import { en } from '@fairlead/shared';
@@ -29,7 +29,14 @@ function covered(weight: number): Set<number> {
 const texts = (words: unknown): string[] =>
   typeof words === 'string' ? [words] : Object.values(words as object).flatMap(texts);
 
+/** What the explanations write, comments aside. */
+const explain = join(here, '../../../../shared/src/explain');
+const formulas = readdirSync(explain)
+  .map((name) => readFileSync(join(explain, name), 'utf8'))
+  .map((source) => source.replace(/\/\*[\s\S]*?\*\/|\/\/.*/g, ''));
+
 const shown = [
+  ...formulas,
   ...texts(en),
   ...Array.from({ length: 64 }, (_, part) => formatLength(12 + part / 64)),
   formatLength(-1.5),
