@@ -3,6 +3,7 @@ import type { DynamicModule } from '@nestjs/common';
 import { APP_FILTER, APP_GUARD, APP_PIPE, DiscoveryModule } from '@nestjs/core';
 import { ServeStaticModule } from '@nestjs/serve-static';
 import { LoggerModule } from 'nestjs-pino';
+import { AnalysesModule } from './analyses/analyses.module';
 import { AuthModule } from './auth/auth.module';
 import { AccessCheck } from './common/access/access-check';
 import { ApiErrorFilter } from './common/filters/api-error.filter';
@@ -40,6 +41,7 @@ export class AppModule {
         CompanyModule,
         JobsModule,
         RunsModule,
+        AnalysesModule,
         HealthModule,
         HousekeepingModule,
         ...(config.clientDir ? [ServeStaticModule.forRoot(staticOptions(config.clientDir))] : []),

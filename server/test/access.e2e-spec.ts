@@ -28,6 +28,7 @@ const OFFICE: readonly Role[] = ['owner', 'estimator', 'foreman'];
 /** Who may call what, said once more and independently of the server's own tables. */
 const EXPECTED: Record<string, 'public' | 'signed-in' | readonly Role[]> = {
   'GET /health': 'public',
+  'POST /analyses': 'public',
   'POST /auth/sign-up': 'public',
   'POST /auth/sign-in': 'public',
   'POST /auth/refresh': 'public',

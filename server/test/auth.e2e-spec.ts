@@ -2,7 +2,7 @@ import type { NestExpressApplication } from '@nestjs/platform-express';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import request from 'supertest';
-import { RATE_LIMITS, RateLimitsService } from '../src/auth/rate-limits.service';
+import { RATE_LIMITS, RateLimitsService } from '../src/rate-limits/rate-limits.service';
 import { newId } from '../src/common/new-id';
 import { api } from './api';
 import {

@@ -1,6 +1,7 @@
 import { Body, Controller, Get, HttpCode, Inject, Post, Req, Res, UseGuards } from '@nestjs/common';
 import type { Request, Response } from 'express';
 import type { Me, SessionAnswer } from '@fairlead/shared';
+import { addressOf } from '../common/address-of';
 import { Public, SignedIn } from '../common/decorators/access';
 import { CurrentViewer } from '../common/decorators/viewer';
 import { OriginRequired, OwnOriginGuard } from '../common/guards/own-origin.guard';
@@ -81,8 +82,4 @@ export class AuthController {
     setRefreshCookie(response, this.config.publicUrl, refreshToken);
     return answer;
   }
-}
-
-function addressOf(request: Request): string {
-  return request.ip ?? 'unknown';
 }

@@ -3,6 +3,7 @@ import { JwtModule } from '@nestjs/jwt';
 import { PassportModule } from '@nestjs/passport';
 import { SequelizeModule } from '@nestjs/sequelize';
 import { PeopleModule } from '../people/people.module';
+import { RateLimitsModule } from '../rate-limits/rate-limits.module';
 import { AccessTokensService } from './access-tokens.service';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
@@ -10,7 +11,6 @@ import { JwtStrategy } from './jwt.strategy';
 import { RefreshToken } from './models/refresh-token.model';
 import { Session } from './models/session.model';
 import { PasswordsService } from './passwords.service';
-import { RateLimitsService } from './rate-limits.service';
 import { SessionsService } from './sessions.service';
 
 @Module({
@@ -19,16 +19,10 @@ import { SessionsService } from './sessions.service';
     JwtModule.register({}),
     PassportModule,
     PeopleModule,
+    RateLimitsModule,
   ],
   controllers: [AuthController],
-  providers: [
-    AccessTokensService,
-    AuthService,
-    JwtStrategy,
-    PasswordsService,
-    RateLimitsService,
-    SessionsService,
-  ],
+  providers: [AccessTokensService, AuthService, JwtStrategy, PasswordsService, SessionsService],
   exports: [AccessTokensService, PasswordsService, SessionsService],
 })
 export class AuthModule {}

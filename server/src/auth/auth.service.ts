@@ -6,7 +6,7 @@ import { PeopleService } from '../people/people.service';
 import { presentMe } from '../people/person.presenter';
 import { AccessTokensService } from './access-tokens.service';
 import { PasswordsService } from './passwords.service';
-import { RATE_LIMITS, RateLimitsService } from './rate-limits.service';
+import { RATE_LIMITS, RateLimitsService } from '../rate-limits/rate-limits.service';
 import { SessionsService } from './sessions.service';
 import type { OpenSession } from './sessions.service';
 import { ACCESS_SECONDS } from './token-rules';

@@ -18,6 +18,7 @@ export const RATE_LIMITS = {
   signInByAddress: { name: 'sign-in-address', hits: 60, seconds: 15 * 60 },
   signUp: { name: 'sign-up', hits: 20, seconds: 60 * 60 },
   refresh: { name: 'refresh', hits: 300, seconds: 5 * 60 },
+  analyses: { name: 'analyses', hits: 120, seconds: 60 },
 } as const satisfies Record<string, RateLimit>;
 
 /**

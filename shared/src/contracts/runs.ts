@@ -72,3 +72,12 @@ export interface RunListFilter {
   status?: Status;
   search?: string;
 }
+
+/** A run judged for somebody who is not signed in. */
+export interface AnalyzeBody {
+  document: RunDocument;
+}
+
+export interface AnalysisAnswer {
+  analysis: RunAnalysis;
+}
