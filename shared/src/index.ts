@@ -52,6 +52,7 @@ export * from './explain/explain-section';
 export * from './explain/explain-set';
 export * from './explain/explain-station';
 export * from './explain/explanation';
+export type * from './explain/pull-question';
 export * from './pull/conditions-in-force';
 export * from './pull/plan-pulls';
 export * from './pull/typical-pulls';

@@ -202,6 +202,19 @@ describe('clearance', () => {
     expect(findings).toEqual([]);
   });
 
+  // By geometry. Two: centres 1.2035 from the axis and 0.949 apart, so 1.678 + √(1.2035² − 0.4745²) − 0.4745.
+  it.each([
+    { tradeSize: '3', count: 2, size: '500', inches: 2.30952 },
+    // The circle round four is 2.41421 diameters across, round three 2.1547, round two 2.
+    { tradeSize: '3', count: 4, size: '500', inches: 1.06491 },
+    { tradeSize: '2', count: 3, size: '750', inches: -0.42383 },
+    { tradeSize: '1-1/2', count: 2, size: '500', inches: -0.288 },
+  ] as const)('of $count × $size in $tradeSize EMT is $inches in', (each) => {
+    const { tradeSize, count, size, inches } = each;
+    const { answer } = checkClearance(section(emt(tradeSize), [wires({ count, size })]));
+    expect(answer).toBeCloseTo(inches, 4);
+  });
+
   it('is tight below a quarter inch, and negative where they cannot go in', () => {
     expect(codes(checkClearance(section(emt('1'), [wires({ count: 1, size: '500' })])))).toEqual([
       'clearance-tight',

@@ -2,14 +2,14 @@ import { clearanceOf } from '../checks/clearance';
 import type { ClearanceForm } from '../checks/clearance';
 import { sizedGroups } from '../checks/section-conductors';
 import type { SizedGroup } from '../checks/section-conductors';
-import type { SectionAnalysis } from '../contracts/run-analysis';
+import type { FillAnswer, SectionAnalysis } from '../contracts/run-analysis';
 import { conductorsInSection } from '../run/conductors-in-section';
 import type { ExpandedRun } from '../run/expanded-run';
 import type { CodeEdition, RunDocument } from '../run/run-document';
 import { racewayDimensions } from '../tables/raceway-dimensions';
 import { formatAngle } from '../units/format-angle';
 import { plain } from './explanation';
-import type { Explanation } from './explanation';
+import type { Explanation, ExplanationInput } from './explanation';
 
 const TABLE_4 = 'NEC Chapter 9 Table 4, 2026 edition';
 const TABLE_5 = 'NEC Chapter 9 Table 5, 2026 edition';
@@ -59,11 +59,7 @@ export function explainFill(
       `${plain(fill.conductorArea, 6)} / ${plain(fill.racewayArea)} × 100 = ${plain(fill.percent)} %`,
     ],
     inputs: [
-      {
-        what: 'racewayArea',
-        value: `${plain(fill.racewayArea)} in²`,
-        source: `${TABLE_4}: ${fill.raceway.tradeSize} ${fill.raceway.type}`,
-      },
+      racewayArea(fill),
       ...set.map(({ group, area }) => ({
         what: 'conductorArea',
         value: `${plain(area, 6)} in²`,
@@ -99,6 +95,12 @@ export function explainJam({ jam, fill }: SectionAnalysis): Explanation | null {
     ],
   };
 }
+
+const racewayArea = ({ racewayArea: area, raceway }: FillAnswer): ExplanationInput => ({
+  what: 'racewayArea',
+  value: `${plain(area)} in²`,
+  source: `${TABLE_4}: ${raceway.tradeSize} ${raceway.type}`,
+});
 
 /** Each form of clearance, D the bore, d the diameter of one, r = d/(D − d). */
 const CLEARANCE_FORMULAS: Record<ClearanceForm, string> = {
@@ -174,11 +176,7 @@ export function explainRoom(
         value: fill.nipple ? '60 %' : '53, 31, 40 %',
         source: 'NEC Chapter 9 Table 1; Note 7 rounds up from 0.8 where all are of one size',
       },
-      {
-        what: 'racewayArea',
-        value: `${plain(fill.racewayArea)} in²`,
-        source: `${TABLE_4}: ${fill.raceway.tradeSize} ${fill.raceway.type}`,
-      },
+      racewayArea(fill),
     ],
   };
 }
